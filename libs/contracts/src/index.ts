@@ -1,0 +1,25 @@
+export type {
+  AccountDto,
+  ChangePasswordRequest,
+  CreatePersonRequest,
+  PersonDto,
+  Preferences,
+  SessionDto,
+  SignInRequest,
+  UpdatePersonRequest,
+} from './people';
+export { may, PERMISSIONS, ROLES } from './permissions';
+export type { Permission, Role } from './permissions';
+export type { Page, PageQuery } from './paging';
+export type { PlanDto, PlanSummaryDto, WritePlanRequest } from './plans';
+export type { FieldProblem, Problem, ProblemReason } from './problems';
+export type { TrailerDto, TrailerListQuery, WriteTrailerRequest } from './trailers';
+export type {
+  AppendEventsRequest,
+  AppendEventsResponse,
+  AppendResult,
+  OpenTraceRequest,
+  TraceDto,
+  TraceListQuery,
+  TraceSummaryDto,
+} from './traces';

@@ -1,0 +1,82 @@
+import type { PartId, SectionTree } from '@lampwright/harness';
+
+/** The shop's times, all in seconds but `powerAlong` (metres) and `walkSecondsPerMetre`. */
+export interface Timing {
+  /** One power-up, from standing at the switch to a reading. */
+  powerSeconds: number;
+  /** 0 where the power is switched from where the person works. */
+  walkSecondsPerMetre: number;
+  /** Where the power is switched, in metres from the front. */
+  powerAlong: number;
+  /** What an overload costs on top: a breaker that cools, a fuse to replace. */
+  overloadSeconds: number;
+}
+
+export type Outcome = 'overload' | 'holds';
+
+/** What one power-up showed, with `open` the separable parts that were open. */
+export interface Reading {
+  open: readonly PartId[];
+  outcome: Outcome;
+}
+
+/** How the belief is formed. */
+export interface BeliefOptions {
+  /** Probability that an energised short shows in one power-up; 1 for a short that always shows. Default 1. */
+  detection?: number;
+  /** The most shorts that may be there at once: 1, 2 or 3. Default 1. */
+  maxFaults?: number;
+}
+
+/** What is known of one circuit after some readings. */
+export interface Belief {
+  /** By section index: the probability that the section holds a short. With one short they sum to 1. */
+  probabilities: number[];
+  /** Indices of the sections with a probability above 0, most likely first. */
+  inQuestion: number[];
+  /** True when no set of shorts within the options explains the readings; then all probabilities are 0. */
+  contradicted: boolean;
+}
+
+/** What the planner is asked: where things stand before the next power-up. */
+export interface Question {
+  tree: SectionTree;
+  /** By section index, summing to 1. */
+  probabilities: readonly number[];
+  /** The separable parts that are open now, also those of other circuits. */
+  open: readonly PartId[];
+  timing: Timing;
+}
+
+/** How far the planner vouches for an advice. */
+export type Proof = 'optimal' | 'optimalInClass' | 'notProven';
+
+/** One proposed power-up, in facts and figures. */
+export interface Advice {
+  /** The whole set of points to have open when power goes on. */
+  open: PartId[];
+  toOpen: PartId[];
+  toClose: PartId[];
+  /** Sections that would be energised. */
+  energised: number[];
+  /** Probability of an overload. */
+  overloadProbability: number;
+  /** Seconds of this power-up, by its outcome. */
+  seconds: Record<Outcome, number>;
+  /** Expected seconds from now until the section is known and everything is closed again, under the planner's own play. */
+  expectedSeconds: number;
+  /** The longest that play can take. */
+  worstSeconds: number;
+  /** No order of work can beat this expectation. */
+  lowerBoundSeconds: number;
+  proof: Proof;
+}
+
+/** The next power-up, or `known` when one section is left and only closing remains. */
+export type Plan =
+  { kind: 'powerUp'; advice: Advice } | { kind: 'known'; section: number; closingSeconds: number };
+
+/** Chooses the next power-up. Pure: the same question gives the same plan. */
+export interface Planner {
+  plan(question: Question): Plan;
+}
