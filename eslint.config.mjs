@@ -21,6 +21,8 @@ const impure = [
   { selector: "CallExpression[callee.name='fetch']", message: 'A library does no I/O.' },
 ];
 
+const readonly = (names) => Object.fromEntries(names.split(' ').map((name) => [name, 'readonly']));
+
 export default defineConfig(
   { ignores: ['**/dist/**', '**/node_modules/**', 'var/**', '.nx/**'] },
   js.configs.recommended,
@@ -72,23 +74,16 @@ export default defineConfig(
   },
   {
     files: ['tools/**', '*.config.*', '**/*.mjs', '**/*.cjs'],
-    languageOptions: {
-      globals: {
-        process: 'readonly',
-        console: 'readonly',
-        URL: 'readonly',
-        fetch: 'readonly',
-        setTimeout: 'readonly',
-        clearTimeout: 'readonly',
-        performance: 'readonly',
-        module: 'writable',
-        require: 'readonly',
-        AbortSignal: 'readonly',
-        Buffer: 'readonly',
-        __dirname: 'readonly',
-      },
-    },
+    languageOptions: { globals: readonly('process console URL fetch performance setTimeout') },
     rules: { 'no-console': 'off', '@typescript-eslint/no-require-imports': 'off' },
+  },
+  {
+    files: ['**/*.cjs'],
+    languageOptions: { globals: readonly('module require __dirname') },
+  },
+  {
+    files: ['**/*.test.mjs'],
+    languageOptions: { globals: readonly('describe it expect beforeEach afterEach') },
   },
   // Plain tables of data may be as long as the data is.
   {

@@ -1,0 +1,57 @@
+/** `npm test`: format, lint, types, unit, API and browser tests; prints how many ran. */
+import { rmSync } from 'node:fs';
+import { chromium } from './lib/chromium.mjs';
+import { checkNode, checkWritable, install, run } from './lib/prepare.mjs';
+import { readReports } from './lib/reports.mjs';
+import { say } from './lib/say.mjs';
+import { at } from './lib/workspace.mjs';
+
+checkNode();
+checkWritable(at('.'), 'The workspace');
+install();
+const browser = chromium();
+
+rmSync(at('dist/reports'), { recursive: true, force: true });
+
+const nx = (...args) => run('npx', ['nx', ...args, '--output-style=static']);
+
+const steps = [
+  ['format', () => run('npx', ['prettier', '--check', '--log-level=warn', '.'])],
+  ['unused code', () => run('npx', ['knip'])],
+  [
+    'lint, types, unit and API tests',
+    () => nx('run-many', '-t', 'lint', 'typecheck', 'test', '--parallel=2', '--nxBail=false'),
+  ],
+  ['build', () => nx('run-many', '-t', 'build')],
+  [
+    'browser tests',
+    () =>
+      run('npx', ['nx', 'run', 'web-e2e:e2e', '--output-style=stream'], { CHROMIUM_PATH: browser }),
+  ],
+];
+
+const broken = [];
+for (const [name, step] of steps) {
+  const from = performance.now();
+  say(`\n== ${name}`);
+  const held = step();
+  if (!held) broken.push(name);
+  say(
+    `== ${name}: ${held ? 'holds' : 'FAILED'} (${((performance.now() - from) / 1000).toFixed(0)} s)`,
+  );
+}
+
+const reports = readReports();
+say('');
+for (const { project, passed, failed, skipped } of reports) {
+  say(
+    `${project.padEnd(12)} ${String(passed).padStart(5)} passed ${failed} failed ${skipped} skipped`,
+  );
+}
+const sum = (key) => reports.reduce((total, report) => total + report[key], 0);
+if (broken.length > 0) say(`\nNot held: ${broken.join('; ')}`);
+// A step that breaks without a failing test (format, lint, types) counts as one failure.
+const failed = Math.max(sum('failed'), broken.length);
+const skipped = sum('skipped');
+say(`${sum('passed')} passed, ${failed} failed${skipped > 0 ? `, ${skipped} skipped` : ''}`);
+process.exit(failed > 0 ? 1 : 0);
