@@ -6,6 +6,7 @@ export type {
   Preferences,
   SessionDto,
   SignInRequest,
+  UpdateAccountRequest,
   UpdatePersonRequest,
 } from './people';
 export { may, PERMISSIONS, ROLES } from './permissions';
@@ -13,7 +14,7 @@ export type { Permission, Role } from './permissions';
 export type { Page, PageQuery } from './paging';
 export type { PlanDto, PlanSummaryDto, WritePlanRequest } from './plans';
 export type { FieldProblem, Problem, ProblemReason } from './problems';
-export type { TrailerDto, TrailerListQuery, WriteTrailerRequest } from './trailers';
+export type { TrailerDto, TrailerListQuery, UpdateTrailerRequest, WriteTrailerRequest } from './trailers';
 export type {
   AppendEventsRequest,
   AppendEventsResponse,

@@ -34,6 +34,12 @@ export interface AccountDto extends PersonDto {
   permissions: Permission[];
 }
 
+/** Only what is given changes. */
+export interface UpdateAccountRequest {
+  name?: string;
+  preferences?: Partial<Preferences>;
+}
+
 export interface SignInRequest {
   email: string;
   password: string;

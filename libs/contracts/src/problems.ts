@@ -39,6 +39,9 @@ export type ProblemReason =
   | 'conflict'
   | 'planFaults'
   | 'tankTrailer'
+  /** The trailer has no plan yet, so there is nothing to narrow on. */
+  | 'noPlan'
+  | 'lastLead'
   | 'tooManyRequests'
   | 'timeout'
   | 'internal';

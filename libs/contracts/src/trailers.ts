@@ -15,7 +15,10 @@ export interface TrailerDto {
   abs: boolean;
   /** The plan it is wired by; `null` while there is none. */
   plan: { id: string; name: string; revision: number } | null;
+  /** The newest trace on it that is neither signed nor abandoned. */
   openTraceId: string | null;
+  /** Counts the changes; sent back with a change, it keeps two people from overwriting each other. */
+  version?: number;
 }
 
 export interface TrailerListQuery extends PageQuery {
@@ -34,4 +37,9 @@ export interface WriteTrailerRequest {
   secondSources: SecondSource[];
   abs: boolean;
   planId?: string | null;
+}
+
+/** Only what is given changes. With a `version` that is no longer the newest the answer is 409 `conflict`. */
+export interface UpdateTrailerRequest extends Partial<WriteTrailerRequest> {
+  version?: number;
 }
