@@ -1,5 +1,5 @@
 /** `npm test`: format, lint, types, unit, API and browser tests; prints how many ran. */
-import { rmSync } from 'node:fs';
+import { rmSync, writeFileSync } from 'node:fs';
 import { chromium } from './lib/chromium.mjs';
 import { checkNode, checkWritable, install, run } from './lib/prepare.mjs';
 import { readReports } from './lib/reports.mjs';
@@ -30,6 +30,7 @@ const steps = [
   ],
 ];
 
+const begun = performance.now();
 const broken = [];
 for (const [name, step] of steps) {
   const from = performance.now();
@@ -40,6 +41,8 @@ for (const [name, step] of steps) {
     `== ${name}: ${held ? 'holds' : 'FAILED'} (${((performance.now() - from) / 1000).toFixed(0)} s)`,
   );
 }
+
+writeFileSync(at('dist/npm-test-seconds'), String((performance.now() - begun) / 1000));
 
 const reports = readReports();
 say('');
