@@ -1,4 +1,39 @@
-export { HARNESS_FORMAT } from './harness';
-export type * from './harness';
+export { circuitTree } from './circuitTree';
+export type { CircuitNode, CircuitTree } from './circuitTree';
+export { energisedParts, energisedSections, sectionByPlace, sectionOf } from './energised';
+export { PartNotOnCircuitError, UnknownCircuitError } from './errors';
 export type { HarnessFault, HarnessFaultCode } from './faults';
+export { HARNESS_FORMAT } from './harness';
+export type {
+  Circuit,
+  CircuitId,
+  Conductor,
+  Harness,
+  Lamp,
+  LampColour,
+  LampTechnology,
+  Load,
+  Part,
+  PartId,
+  PartKind,
+  Position,
+  ProtectionKind,
+  Run,
+  RunId,
+  Separable,
+} from './harness';
+export { indexHarness } from './indexHarness';
+export type { HarnessIndex } from './indexHarness';
+export { expectedAmps, loadsOf } from './loads';
+export { parsePlaceKey, placeKey } from './placeKey';
+export { placesOnCircuit } from './placesOnCircuit';
 export type { Place, PlaceRef, Section, SectionTree, SeparablePoint } from './sections';
+export { sectionTree } from './sectionTree';
+export type { SectionOptions } from './sectionTree';
+export { downstream, lampsOnCircuit, partsOnCircuit, pathToInlet } from './walks';
+export {
+  DEFAULT_PART_WEIGHT,
+  DEFAULT_RUN_WEIGHT_PER_METRE,
+  partWeight,
+  runWeight,
+} from './weights';
