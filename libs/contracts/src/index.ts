@@ -14,7 +14,12 @@ export type { Permission, Role } from './permissions';
 export type { Page, PageQuery } from './paging';
 export type { PlanDto, PlanSummaryDto, WritePlanRequest } from './plans';
 export type { FieldProblem, Problem, ProblemReason } from './problems';
-export type { TrailerDto, TrailerListQuery, UpdateTrailerRequest, WriteTrailerRequest } from './trailers';
+export type {
+  TrailerDto,
+  TrailerListQuery,
+  UpdateTrailerRequest,
+  WriteTrailerRequest,
+} from './trailers';
 export type {
   AppendEventsRequest,
   AppendEventsResponse,
