@@ -1,4 +1,4 @@
-import type { PartId, SectionTree } from '@lampwright/harness';
+import type { PartId, SectionTree, SeparablePoint } from '@lampwright/harness';
 
 /** The shop's times, all in seconds but `powerAlong` (metres) and `walkSecondsPerMetre`. */
 export interface Timing {
@@ -46,6 +46,17 @@ export interface Question {
   /** The separable parts that are open now, also those of other circuits. */
   open: readonly PartId[];
   timing: Timing;
+  /**
+   * The open points of other circuits, with their times. They do not matter to this circuit, so they stay as they are
+   * until everything is closed at the end, which they make longer. An open id that is neither here nor in the tree
+   * stays open too, but costs nothing.
+   */
+  elsewhere?: readonly SeparablePoint[];
+  /**
+   * The points that were open at the last power-up; `open` where nothing was touched since. A power-up that would
+   * energise the very same sections again is not proposed.
+   */
+  poweredWith?: readonly PartId[];
 }
 
 /** How far the planner vouches for an advice. */
