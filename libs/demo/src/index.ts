@@ -1,1 +1,5 @@
-export {};
+export { demoYard } from './demoYard';
+export type { DemoYard } from './demoYard';
+export type { DemoPerson } from './people';
+export type { DemoPlan } from './plans';
+export type { DemoTrailer } from './trailers';
