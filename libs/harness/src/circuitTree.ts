@@ -1,3 +1,4 @@
+import { appendTo } from './appendTo';
 import { UnknownCircuitError } from './errors';
 import type { CircuitId, Harness, Part, PartId, Run } from './harness';
 
@@ -49,10 +50,7 @@ export function circuitTree(harness: Harness, circuitId: CircuitId): CircuitTree
 function runsByFeedSide(harness: Harness, circuitId: CircuitId): Map<PartId, Run[]> {
   const runsFrom = new Map<PartId, Run[]>();
   for (const run of harness.runs) {
-    if (!run.circuits.includes(circuitId)) continue;
-    const siblings = runsFrom.get(run.from);
-    if (siblings) siblings.push(run);
-    else runsFrom.set(run.from, [run]);
+    if (run.circuits.includes(circuitId)) appendTo(runsFrom, run.from, run);
   }
   return runsFrom;
 }

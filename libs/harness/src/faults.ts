@@ -1,3 +1,6 @@
+/** A fault lists no more others than a person would read; `found` then gives their full number. */
+export const OTHERS_SHOWN = 20;
+
 /**
  * A fault in a plan document. It carries facts; the words are the web's.
  *
@@ -12,14 +15,22 @@ export interface HarnessFault {
   wanted?: string | number;
   /** The circuit on which the fault shows, for faults of the tree. */
   circuit?: string;
-  /** Further ids that a person needs to see: the parts of a loop, the two feeds of a part. */
+  /**
+   * What else a person needs to see, at most `OTHERS_SHOWN` of it: the parts of a loop, the runs that feed a part
+   * twice, the parts that hang on an unreachable one, the several inlets, the values that are allowed.
+   */
   others?: string[];
+  /** Where a text stops being JSON, both counted from 1. */
+  line?: number;
+  column?: number;
 }
 
 /** Every way in which a document can be wrong. Adding one makes the web's catalogue fail to compile until it has words. */
 export type HarnessFaultCode =
   | 'notJson'
   | 'tooLarge'
+  /** Nested deeper than any plan is. */
+  | 'tooDeep'
   | 'wrongFormat'
   | 'missing'
   | 'wrongType'
@@ -27,6 +38,8 @@ export type HarnessFaultCode =
   | 'empty'
   | 'notFinite'
   | 'negative'
+  | 'notPositive'
+  | 'notWhole'
   | 'duplicateId'
   | 'unknownReference'
   | 'noInlet'
@@ -41,6 +54,8 @@ export type HarnessFaultCode =
   | 'loadMissing'
   | 'loadWithoutFeed'
   | 'duplicateLoad'
+  /** A run names the same circuit twice. */
+  | 'duplicateCircuit'
   | 'lampWithoutData'
   | 'moduleWithoutData'
   | 'strayData';

@@ -2,6 +2,7 @@ export { circuitTree } from './circuitTree';
 export type { CircuitNode, CircuitTree } from './circuitTree';
 export { energisedParts, energisedSections, sectionByPlace, sectionOf } from './energised';
 export { PartNotOnCircuitError, UnknownCircuitError } from './errors';
+export { OTHERS_SHOWN } from './faults';
 export type { HarnessFault, HarnessFaultCode } from './faults';
 export { HARNESS_FORMAT } from './harness';
 export type {
@@ -27,6 +28,10 @@ export type { HarnessIndex } from './indexHarness';
 export { expectedAmps, loadsOf } from './loads';
 export { parsePlaceKey, placeKey } from './placeKey';
 export { placesOnCircuit } from './placesOnCircuit';
+export { FAULT_LIMIT } from './reader/faultList';
+export { readHarness } from './reader/readHarness';
+export type { HarnessReading } from './reader/readHarness';
+export { DEFAULT_MAX_BYTES, readHarnessText } from './reader/readHarnessText';
 export type { Place, PlaceRef, Section, SectionTree, SeparablePoint } from './sections';
 export { sectionTree } from './sectionTree';
 export type { SectionOptions } from './sectionTree';
