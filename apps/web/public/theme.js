@@ -1,0 +1,15 @@
+/* Sets the theme before anything is painted; `src/theme/theme-choice.ts` writes what this reads. */
+(function () {
+  var choice = null;
+  try {
+    choice = localStorage.getItem('lampwright.theme');
+  } catch (error) {
+    /* Storage can be shut off; light is then what a yard in the sun wants. */
+    choice = null;
+  }
+  var dark =
+    choice === 'dark' ||
+    (choice === 'system' && matchMedia('(prefers-color-scheme: dark)').matches);
+  document.documentElement.className = dark ? 'dark' : 'light';
+  document.documentElement.style.colorScheme = dark ? 'dark' : 'light';
+})();

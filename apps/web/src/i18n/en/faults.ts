@@ -1,0 +1,36 @@
+import type { HarnessFaultCode } from '@lampwright/harness';
+
+/** One sentence a fault: what is wrong where, and what would be right. */
+export default {
+  notJson: 'The file is not JSON: {{found}}. Export the plan again or open it in an editor.',
+  tooLarge: '{{path}}: {{found}} is more than the {{wanted}} that a plan may have.',
+  tooDeep: '{{path}} is nested deeper than any plan is.',
+  wrongFormat: '{{path}} is “{{found}}”; this program reads “{{wanted}}”.',
+  missing: '{{path}} is missing; it must be {{wanted}}.',
+  wrongType: '{{path}} is {{found}}; it must be {{wanted}}.',
+  notAllowed: '{{path}} is “{{found}}”; allowed is {{wanted}}.',
+  empty: '{{path}} is empty; it must have {{wanted}}.',
+  notFinite: '{{path}} is {{found}}; it must be an ordinary number.',
+  negative: '{{path}} is {{found}}; it must be 0 or more.',
+  notPositive: '{{path}} is {{found}}; it must be more than 0.',
+  notWhole: '{{path}} is {{found}}; it must be a whole number.',
+  duplicateId: '{{path}}: the id “{{id}}” is used twice. Every id must be its own.',
+  unknownReference: '{{path}} names “{{found}}”, which is not in the plan.',
+  noInlet: '{{path}}: no part is the inlet. Exactly one must be.',
+  severalInlets: '{{path}}: there are several inlets ({{others}}). Exactly one may be.',
+  inletSeparable: '{{path}}: the inlet “{{id}}” is marked as separable. It cannot be.',
+  spliceSeparable: '{{path}}: the splice “{{id}}” is marked as separable. It cannot be.',
+  runToItself: '{{path}}: the run “{{id}}” starts and ends at the same part.',
+  runIntoInlet: '{{path}}: the run “{{id}}” leads into the inlet, which only feeds.',
+  loop: '{{path}}: on circuit “{{circuit}}” the runs form a loop ({{others}}).',
+  twoFeeds: '{{path}}: on circuit “{{circuit}}” the part “{{id}}” has two feeds ({{others}}).',
+  unreachable: '{{path}}: on circuit “{{circuit}}” nothing leads from the inlet to “{{id}}”.',
+  loadMissing: '{{path}}: circuit “{{circuit}}” feeds “{{id}}”, which has no load on it.',
+  loadWithoutFeed:
+    '{{path}}: “{{id}}” has a load on circuit “{{circuit}}”, which does not feed it.',
+  duplicateLoad: '{{path}}: “{{id}}” has two loads on circuit “{{circuit}}”.',
+  duplicateCircuit: '{{path}}: the run “{{id}}” names circuit “{{circuit}}” twice.',
+  lampWithoutData: '{{path}}: the lamp “{{id}}” has no lamp data.',
+  moduleWithoutData: '{{path}}: the module “{{id}}” has no module data.',
+  strayData: '{{path}}: “{{id}}” has data that its kind does not take.',
+} as const satisfies Record<HarnessFaultCode, string>;

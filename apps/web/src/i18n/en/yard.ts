@@ -1,0 +1,4 @@
+export default {
+  title: 'Yard',
+  greeting: 'Hello, {{name}}',
+} as const;

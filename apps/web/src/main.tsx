@@ -1,0 +1,18 @@
+import '@fontsource-variable/source-sans-3/wght.css';
+import { StrictMode } from 'react';
+import { createRoot } from 'react-dom/client';
+import { createBrowserRouter, RouterProvider } from 'react-router-dom';
+import { Providers } from './app/providers';
+import { routes } from './app/routes';
+import './i18n/i18n';
+
+const root = document.getElementById('root');
+if (!root) throw new Error('index.html has no #root.');
+
+createRoot(root).render(
+  <StrictMode>
+    <Providers>
+      <RouterProvider router={createBrowserRouter(routes)} />
+    </Providers>
+  </StrictMode>,
+);

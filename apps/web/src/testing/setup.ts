@@ -1,0 +1,28 @@
+import '@testing-library/jest-dom/vitest';
+import '../i18n/i18n';
+import { fakeIndexedDb } from './fake-indexed-db';
+
+// jsdom has none of these, and the dialog and the theme read them.
+window.matchMedia ??= ((media: string) => ({
+  matches: false,
+  media,
+  onchange: null,
+  addListener: () => undefined,
+  removeListener: () => undefined,
+  addEventListener: () => undefined,
+  removeEventListener: () => undefined,
+  dispatchEvent: () => false,
+})) as typeof window.matchMedia;
+
+globalThis.ResizeObserver ??= class {
+  observe() {}
+  unobserve() {}
+  disconnect() {}
+} as typeof ResizeObserver;
+
+window.scrollTo = () => undefined;
+
+beforeEach(() => {
+  fakeIndexedDb.reset();
+  vi.stubGlobal('indexedDB', fakeIndexedDb.factory);
+});

@@ -1,0 +1,86 @@
+import { defineRecipe } from '@chakra-ui/react';
+
+/** Sizes: `answer` for the two or three answers of a trace, `field` for gloves, `office` for desks. */
+export const buttonRecipe = defineRecipe({
+  className: 'button',
+  base: {
+    display: 'inline-flex',
+    alignItems: 'center',
+    justifyContent: 'center',
+    gap: '2.5',
+    border: '2px solid',
+    borderRadius: 'md',
+    fontFamily: 'body',
+    fontWeight: 'semibold',
+    lineHeight: '1.15',
+    textDecoration: 'none',
+    textAlign: 'center',
+    cursor: 'pointer',
+    userSelect: 'none',
+    flexShrink: '0',
+    transition: 'background-color 80ms, transform 80ms',
+    _active: { transform: 'translateY(1px)' },
+    _disabled: { cursor: 'not-allowed', opacity: '0.55' },
+    '& svg': { flexShrink: '0' },
+  },
+  variants: {
+    look: {
+      primary: {
+        bg: 'ink.solid',
+        borderColor: 'ink.solid',
+        color: 'ink.onSolid',
+        _active: { bg: 'ink.pressed', borderColor: 'ink.pressed' },
+      },
+      secondary: {
+        bg: 'bg.panel',
+        borderColor: 'edge',
+        color: 'fg',
+        _active: { bg: 'bg.sunken' },
+      },
+      quiet: {
+        bg: 'transparent',
+        borderColor: 'transparent',
+        color: 'fg',
+        _hover: { bg: 'bg.sunken' },
+        _active: { bg: 'bg.sunken' },
+      },
+      overload: {
+        bg: 'ember.solid',
+        borderColor: 'ember.solid',
+        color: 'ember.onSolid',
+        _dark: { borderColor: 'ember.mark' },
+        _active: { bg: 'ember.pressed' },
+      },
+      holds: {
+        bg: 'pine.solid',
+        borderColor: 'pine.solid',
+        color: 'pine.onSolid',
+        _dark: { borderColor: 'pine.mark' },
+        _active: { bg: 'pine.pressed' },
+      },
+      danger: {
+        bg: 'bg.panel',
+        borderColor: 'ember.mark',
+        color: 'ember.fg',
+        _active: { bg: 'ember.wash' },
+      },
+    },
+    size: {
+      answer: {
+        minH: 'answer',
+        w: 'full',
+        px: '5',
+        py: '3',
+        gap: '4',
+        fontSize: 'xl',
+        borderRadius: 'lg',
+        justifyContent: 'flex-start',
+        textAlign: 'left',
+      },
+      field: { minH: 'field', minW: 'field', px: '5', py: '2', fontSize: 'lg' },
+      office: { minH: 'office', minW: 'office', px: '4', py: '1.5', fontSize: 'md' },
+    },
+    wide: { true: { w: 'full' } },
+  },
+  defaultVariants: { look: 'secondary', size: 'field' },
+});

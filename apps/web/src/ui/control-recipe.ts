@@ -1,0 +1,27 @@
+import { defineRecipe } from '@chakra-ui/react';
+
+/** The box of everything that is typed or picked from. */
+export const controlRecipe = defineRecipe({
+  className: 'control',
+  base: {
+    w: 'full',
+    minH: 'office',
+    px: '3.5',
+    py: '2',
+    bg: 'bg.panel',
+    color: 'fg',
+    font: 'inherit',
+    border: '1.5px solid',
+    borderColor: 'edge',
+    borderRadius: 'md',
+    '&[aria-invalid]': { borderColor: 'ember.mark', borderWidth: '2px' },
+    _disabled: { opacity: '0.6', cursor: 'not-allowed' },
+  },
+  variants: {
+    size: {
+      office: { minH: 'office', fontSize: 'md' },
+      field: { minH: 'field', fontSize: 'lg' },
+    },
+  },
+  defaultVariants: { size: 'field' },
+});

@@ -1,0 +1,33 @@
+import react from '@vitejs/plugin-react';
+import { fileURLToPath } from 'node:url';
+import { defineConfig } from 'vitest/config';
+import { alias } from '../../tools/vitest.shared.mts';
+
+const repo = fileURLToPath(new URL('../..', import.meta.url));
+
+/** Libraries that change together and that every screen needs. */
+const vendor = [
+  { name: 'react', test: /node_modules[\\/](react|react-dom|scheduler)[\\/]/ },
+  { name: 'router', test: /node_modules[\\/]react-router/ },
+  { name: 'look', test: /node_modules[\\/](@chakra-ui|@ark-ui|@zag-js|@emotion|@pandacss|stylis)/ },
+  { name: 'words', test: /node_modules[\\/](i18next|react-i18next)[\\/]/ },
+];
+
+export default defineConfig({
+  root: fileURLToPath(new URL('.', import.meta.url)),
+  cacheDir: `${repo}node_modules/.vite/web`,
+  plugins: [react()],
+  resolve: { alias },
+  server: { proxy: { '/api': 'http://127.0.0.1:3000' } },
+  build: {
+    outDir: `${repo}dist/apps/web`,
+    emptyOutDir: true,
+    rolldownOptions: { output: { codeSplitting: { groups: vendor } } },
+  },
+  test: {
+    environment: 'jsdom',
+    globals: true,
+    include: ['src/**/*.test.{ts,tsx}'],
+    setupFiles: ['src/testing/setup.ts'],
+  },
+});
