@@ -1,3 +1,5 @@
+import { finishedTraces } from './finishedTraces';
+import type { DemoTrace } from './finishedTraces';
 import { people } from './people';
 import type { DemoPerson } from './people';
 import { plans } from './plans';
@@ -11,6 +13,7 @@ export interface DemoYard {
   people: readonly DemoPerson[];
   trailers: readonly DemoTrailer[];
   plans: readonly DemoPlan[];
+  finishedTraces: readonly DemoTrace[];
 }
 
 /** An invented yard to try the program on: people without passwords, trailers, and a plan for each. */
@@ -20,4 +23,5 @@ export const demoYard: DemoYard = {
   people: Object.values(people),
   trailers: Object.values(trailers),
   plans: Object.values(plans),
+  finishedTraces,
 };
