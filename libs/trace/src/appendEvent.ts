@@ -1,0 +1,62 @@
+import type { TraceEvent } from './events';
+import type { EventOf } from './eventOf';
+import { isTraceEventType } from './eventTypes';
+import { refusalFor } from './refusalFor';
+import { refuse } from './rules/rule';
+import { sameJson } from './sameJson';
+import type { Refusal } from './state';
+import { foldTrace, step, type TraceLog } from './traceLog';
+
+export type AppendOutcome =
+  { ok: true; log: TraceLog; duplicate?: boolean } | { ok: false; refusal: Refusal };
+
+/**
+ * Adds one event, or says why not; a refused event leaves the log as it was. One transition an event; taking back folds
+ * anew. The same event sent twice is a duplicate and changes nothing.
+ */
+export function appendEvent(log: TraceLog, event: TraceEvent): AppendOutcome {
+  const known = log.record.events.find(({ id }) => id === event.id);
+  if (known) {
+    return sameJson(known, event)
+      ? { ok: true, log, duplicate: true }
+      : { ok: false, refusal: refuse('malformed', [event.id]) };
+  }
+  const refusal = refusalToAdd(log, event);
+  if (refusal) return { ok: false, refusal };
+  const record = { ...log.record, events: [...log.record.events, event] };
+  if (event.type === 'event.undone') return { ok: true, log: foldTrace(record) };
+  return {
+    ok: true,
+    log: {
+      record,
+      snapshot: step(log.snapshot, event),
+      effective: [...log.effective, event],
+      skipped: log.skipped,
+    },
+  };
+}
+
+function refusalToAdd(log: TraceLog, event: TraceEvent): Refusal | null {
+  if (!isTraceEventType(event.type)) return refuse('malformed', [String(event.type)]);
+  if (log.snapshot.status !== 'active') return refuse('fixed', [log.record.id]);
+  const expected = nextSeq(log, event.device);
+  if (event.seq !== expected) return refuse('outOfSequence', [event.device, String(expected)]);
+  return event.type === 'event.undone' ? ruleForUndo(log, event) : refusalFor(log.snapshot, event);
+}
+
+/** The number that a device gives its next event of this trace. */
+export function nextSeq(log: TraceLog, device: string): number {
+  return (log.record.events.findLast((event) => event.device === device)?.seq ?? 0) + 1;
+}
+
+/** Only the newest event that still stands can be taken back, one at a time. */
+function ruleForUndo(log: TraceLog, event: EventOf<'event.undone'>): Refusal | null {
+  const newest = log.effective.at(-1);
+  if (!newest) return refuse('nothingToUndo', [event.target]);
+  return newest.id === event.target ? null : refuse('notTheLastEvent', [newest.id]);
+}
+
+/** Whether there is an event to take back. */
+export function canUndo(log: TraceLog): boolean {
+  return log.snapshot.status === 'active' && log.effective.length > 0;
+}
