@@ -1,0 +1,5 @@
+export { arbitraryHarness } from './arbitraryHarness';
+export type { ArbitraryHarnessOptions } from './arbitraryHarness';
+export { exactCases, largeCases } from './planCases';
+export type { CaseExpectation, CaseSetting, PlanCase } from './planCases';
+export { chain, CIRCUIT, star } from './plans';
