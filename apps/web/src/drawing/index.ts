@@ -1,0 +1,13 @@
+export { HarnessDrawing } from './harness-drawing';
+export { HarnessList } from './harness-list';
+export { SuspicionBar } from './suspicion-bar';
+export type {
+  DrawingMarks,
+  DrawingTrailer,
+  HarnessDrawingProps,
+  HarnessListProps,
+  LengthUnit,
+  PlaceMark,
+  SuspicionBarProps,
+  SuspicionSlice,
+} from './marks';

@@ -1,0 +1,33 @@
+import type { Part } from '@lampwright/harness';
+import type { DrawingTrailer } from '../marks';
+
+/** The trailer as a rectangle in metres. */
+export interface Extent {
+  length: number;
+  width: number;
+  /** True where the size was inferred from the parts. */
+  inferred: boolean;
+}
+
+const SHORTEST = 2;
+const NARROWEST = 1.6;
+
+/**
+ * The trailer's size: as given, but never smaller than its parts reach; else just around the parts. Metres.
+ */
+export function extentOf(parts: readonly Part[], trailer?: DrawingTrailer): Extent {
+  const reach = Math.max(0, ...parts.map((part) => part.at.along));
+  const side = 2 * Math.max(0, ...parts.map((part) => Math.abs(part.at.across)));
+  if (trailer) {
+    return {
+      length: Math.max(trailer.lengthMetres, reach),
+      width: Math.max(trailer.widthMetres, side),
+      inferred: false,
+    };
+  }
+  return {
+    length: Math.max(reach + 0.1, SHORTEST),
+    width: Math.max(side + 0.1, NARROWEST),
+    inferred: true,
+  };
+}

@@ -1,0 +1,20 @@
+import { useTranslation } from 'react-i18next';
+import { colours } from './drawing-colours';
+import type { SheetText } from './sheet-texts';
+
+export function SheetTexts({ texts, size }: { texts: readonly SheetText[]; size: number }) {
+  const { t } = useTranslation('drawing');
+  return (
+    <g aria-hidden fontSize={size} fill={colours.muted} letterSpacing={0.2}>
+      {texts.map(({ key, at, turn }) => (
+        <text
+          key={key}
+          transform={`translate(${at.x} ${at.y}) rotate(${turn})`}
+          textAnchor={turn ? 'middle' : 'start'}
+        >
+          {t(key)}
+        </text>
+      ))}
+    </g>
+  );
+}
