@@ -1,0 +1,128 @@
+import { choicesOf } from './choices';
+import type { Length, Policy } from './playOut';
+import { finalWalk, type Situation, type Step, type Workbench } from './situation';
+
+/** How widely a search looks. */
+export interface Breadth {
+  /** At most so many points opened for one power-up. */
+  mostNew: number;
+  /** How many choices are looked into, by the number of cells in question. */
+  width: (count: number) => number;
+}
+
+/** Thrown inside a search that has used up its steps, and caught by whoever set the limit. */
+export class StepsSpent extends Error {}
+
+/**
+ * Looks into the best few choices of every situation that the best few choices lead to, and remembers each. Choices are
+ * ranked by playing the base policies out behind them, so a search is never worse than the best of these policies, nor
+ * than a narrower search. Weighted seconds throughout: expected seconds times the probability of the situation.
+ */
+export class Search {
+  private readonly values = new Map<string, Length>();
+  private readonly basic: Map<string, Length>[];
+  private left: number;
+
+  constructor(
+    private readonly bench: Workbench,
+    private readonly policies: readonly Policy[],
+    private readonly breadth: Breadth,
+    steps: number,
+  ) {
+    this.left = steps;
+    this.basic = policies.map(() => new Map());
+  }
+
+  /** The best step found, and how long its play is to the end, closing included. */
+  best(situation: Situation): { step: Step; length: Length } {
+    let best: { step: Step; length: Length } | undefined;
+    for (const step of this.ranked(situation)) {
+      const length = this.after(situation, step, (next) => this.value(next));
+      if (!best || length.weighted < best.length.weighted) best = { step, length };
+    }
+    if (!best) throw new Error('two cells in question that no point parts');
+    return best;
+  }
+
+  private value(situation: Situation): Length {
+    if (situation.count <= 1) return this.end(situation);
+    const key = keyOf(situation);
+    const known = this.values.get(key);
+    if (known) return known;
+    const { length } = this.best(situation);
+    this.values.set(key, length);
+    return length;
+  }
+
+  private ranked(situation: Situation): Step[] {
+    const steps = this.stepsOf(situation).map((step) => ({
+      step,
+      length: this.after(situation, step, (next) => this.basicLength(next)),
+    }));
+    steps.sort((a, b) => a.length.weighted - b.length.weighted);
+    return steps.slice(0, this.breadth.width(situation.count)).map(({ step }) => step);
+  }
+
+  private stepsOf(situation: Situation): Step[] {
+    const steps: Step[] = [];
+    const seen = new Set<string>();
+    for (const { open } of choicesOf(this.bench, situation, this.breadth.mostNew, true)) {
+      const key = open.join();
+      if (seen.has(key)) continue;
+      seen.add(key);
+      const step = this.bench.step(situation, open);
+      if (!step) continue;
+      steps.push(step);
+      const tidy = situation.spent > 0 && !step.tidies && this.bench.step(situation, open, true);
+      if (tidy) steps.push(tidy);
+    }
+    this.left -= steps.length;
+    if (this.left < 0) throw new StepsSpent();
+    return steps;
+  }
+
+  private end(situation: Situation): Length {
+    const walk = finalWalk(this.bench.cells, situation);
+    return { weighted: situation.weight * walk, worst: walk };
+  }
+
+  private after(situation: Situation, step: Step, follow: (next: Situation) => Length): Length {
+    const { overloadSeconds } = this.bench.cells;
+    const { seconds, onOverload, onHolds } = step;
+    const overload = follow(onOverload);
+    const holds = follow(onHolds);
+    return {
+      weighted:
+        situation.weight * seconds +
+        onOverload.weight * overloadSeconds +
+        overload.weighted +
+        holds.weighted,
+      worst: seconds + Math.max(overloadSeconds + overload.worst, holds.worst),
+    };
+  }
+
+  private basicLength(situation: Situation): Length {
+    let best: Length = { weighted: Infinity, worst: Infinity };
+    for (const [at, policy] of this.policies.entries()) {
+      const length = this.played(situation, policy, this.basic[at] ?? new Map());
+      if (length.weighted < best.weighted) best = length;
+    }
+    return best;
+  }
+
+  private played(situation: Situation, policy: Policy, known: Map<string, Length>): Length {
+    if (situation.count <= 1) return this.end(situation);
+    const key = keyOf(situation);
+    const before = known.get(key);
+    if (before) return before;
+    this.left -= 1;
+    const step = policy(this.bench, situation);
+    const length = this.after(situation, step, (next) => this.played(next, policy, known));
+    known.set(key, length);
+    return length;
+  }
+}
+
+function keyOf({ cells, open, forced, spent }: Situation): string {
+  return `${String.fromCharCode(...cells)}|${open.join()}|${forced}|${spent}`;
+}
