@@ -31,3 +31,6 @@ export type * from './state';
 export { traceLogic, type TraceActorState } from './traceLogic';
 export { foldTrace, openTrace, type SkippedEvent, type TraceLog } from './traceLog';
 export { traceMachine, type TraceSnapshot, type TraceTag } from './traceMachine';
+export { type TraceFault, type TraceFaultCode, type TraceReading } from './reading/faults';
+export { readTraceEvent } from './reading/readTraceEvent';
+export { readTraceRecord } from './reading/readTraceRecord';
