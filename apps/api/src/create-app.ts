@@ -6,6 +6,7 @@ import { Logger } from 'nestjs-pino';
 import { AppModule } from './app.module';
 import { useBodyParsers } from './common/body-parsers';
 import { DOCS_PATH, useOpenApi } from './common/open-api';
+import { requestId } from './common/request-id';
 import { docsHeaders, securityHeaders } from './common/security-headers';
 import type { Settings } from './common/settings';
 import { useWebFiles } from './common/web-files';
@@ -21,6 +22,7 @@ export async function createApp(settings: Settings): Promise<NestExpressApplicat
   app.setGlobalPrefix('api');
   app.set('trust proxy', settings.trustProxy);
   app.disable('x-powered-by');
+  app.use(requestId);
   app.use(securityHeaders(settings.https));
   app.use(`/${DOCS_PATH}`, docsHeaders(settings.https));
   app.use(compression());

@@ -1,5 +1,7 @@
 import type { NestExpressApplication } from '@nestjs/platform-express';
+import type { NextFunction, Request, Response } from 'express';
 import type { IncomingMessage } from 'node:http';
+import { toProblemException } from './to-problem-exception';
 
 const PLAN_LIMIT = '6mb';
 const LIMIT = '256kb';
@@ -14,6 +16,10 @@ export function useBodyParsers(app: NestExpressApplication): void {
   app.useBodyParser('json', {
     limit: LIMIT,
     type: (request) => isJson(request) && !isPlan(request),
+  });
+  // Nest would turn a parser's error into its own before the filter sees it.
+  app.use((error: unknown, _request: Request, _response: Response, next: NextFunction) => {
+    next(toProblemException(error));
   });
 }
 

@@ -1,4 +1,3 @@
-import { randomUUID } from 'node:crypto';
 import { RequestMethod } from '@nestjs/common';
 import type { Request, Response } from 'express';
 import type { Params } from 'nestjs-pino';
@@ -11,11 +10,7 @@ export function loggerOptions(level: string): Params {
   return {
     pinoHttp: {
       level,
-      genReqId: (_request, response) => {
-        const id = randomUUID();
-        response.setHeader('X-Request-Id', id);
-        return id;
-      },
+      genReqId: ({ id }) => id,
       customLogLevel: (_request, response, error) =>
         error || response.statusCode >= 500 ? 'error' : 'info',
       serializers: {

@@ -104,9 +104,7 @@ export const FIELD_MESSAGES = {
   wrongPassword: 'This is not the current password.',
   staleVersion: 'Somebody changed it in the meantime; read it again.',
   revisionTaken: 'Somebody stored a revision at the same moment; read the plan again.',
-  otherTrailer: 'A trace with this id is open on another trailer.',
-  otherContent: 'An event with this id is stored with other content.',
-  otherTrace: 'An event with this id belongs to another trace.',
+  otherTrailer: 'Another trace, on another trailer or by another person, has this id.',
   notThePerson: 'An event carries the id of the person who is signed in.',
   unknownSort: 'Sort by one of these, with a leading - for descending.',
 } as const;

@@ -1,4 +1,10 @@
-import { Catch, Logger, type ArgumentsHost, type ExceptionFilter } from '@nestjs/common';
+import {
+  Catch,
+  Logger,
+  NotFoundException,
+  type ArgumentsHost,
+  type ExceptionFilter,
+} from '@nestjs/common';
 import type { Problem } from '@lampwright/contracts';
 import type { Request, Response } from 'express';
 import { allowedMethods } from './allowed-methods';
@@ -19,7 +25,7 @@ export class ProblemFilter implements ExceptionFilter {
       response.end();
       return;
     }
-    const exception = refine(toProblemException(error), request, response);
+    const exception = refine(toProblemException(error), error, request, response);
     const problem = describe(exception, request.id);
     if (problem.status >= 500) {
       this.logger.error(error instanceof Error ? (error.stack ?? error.message) : String(error));
@@ -38,10 +44,12 @@ export class ProblemFilter implements ExceptionFilter {
 /** An address that exists under another method is a 405; a throttled request says how long to wait. */
 function refine(
   exception: ProblemException,
+  error: unknown,
   request: Request,
   response: Response,
 ): ProblemException {
-  if (exception.reason === 'notFound' && !request.route) {
+  // Nest's own exception, not ours: no route has answered.
+  if (error instanceof NotFoundException) {
     const allowed = allowedMethods(request);
     if (allowed.length === 0 || allowed.includes(request.method)) return exception;
     response.setHeader('Allow', allowed.join(', '));
