@@ -2,12 +2,7 @@ import { expectedAmps, partsOnCircuit, readHarness, sectionTree } from '@lampwri
 import type { Harness } from '@lampwright/harness';
 import { demoYard } from './demoYard';
 import { plans } from './plans';
-
-const fleet = demoYard.trailers.map((trailer) => {
-  const plan = demoYard.plans.find((each) => each.id === trailer.planId);
-  if (!plan) throw new Error(`${trailer.unit} has no plan`);
-  return { unit: trailer.unit, trailer, harness: plan.harness };
-});
+import { fleet } from './testing/fleet';
 
 /** How many lamps serve each function, per colour: `clearance amber` and so on. */
 function functionsOf(harness: Harness): Map<string, number> {

@@ -1,12 +1,12 @@
 import { lampsOnCircuit, placeKey, placesOnCircuit } from '@lampwright/harness';
 import { demoYard } from './demoYard';
 import { finishedTraces } from './finishedTraces';
+import { fleet } from './testing/fleet';
 
 const stories = finishedTraces.map((story) => {
-  const trailer = demoYard.trailers.find(({ id }) => id === story.trailerId);
-  const plan = demoYard.plans.find(({ id }) => id === trailer?.planId);
-  if (!trailer || !plan) throw new Error(`${story.id} has no trailer with a plan`);
-  return { unit: trailer.unit, story, trailer, harness: plan.harness };
+  const wired = fleet.find(({ trailer }) => trailer.id === story.trailerId);
+  if (!wired) throw new Error(`${story.id} has no trailer`);
+  return { ...wired, story };
 });
 
 describe('the finished traces', () => {
