@@ -1,42 +1,27 @@
 import { energisedSections, type SectionTree } from '@lampwright/harness';
 import type { Belief, Reading } from '@lampwright/isolation';
-import type { TraceContext } from './state';
 
 /**
  * The probabilities that a planner of one short is asked about, summing to 1. Where several shorts may be there at once
- * the hunt is for one of them: within the smallest energised part that overloaded, which surely holds one.
- * O(sections × readings).
+ * the hunt is for one of them: within what was energised at the latest overload, which surely holds one. A planner
+ * then never asks for that same state again. O(sections × readings).
  */
 export function focus(
-  context: TraceContext,
   tree: SectionTree,
   belief: Belief,
   readings: readonly Reading[],
+  maxFaults: number,
 ): number[] {
   const { probabilities } = belief;
-  const within = context.maxFaults > 1 ? smallestOverload(tree, probabilities, readings) : null;
-  const kept = probabilities.map((probability, index) =>
-    !within || within[index] ? probability : 0,
-  );
-  const sum = kept.reduce((total, probability) => total + probability, 0);
-  return kept.map((probability) => probability / sum);
+  const latest = readings.findLast(({ outcome }) => outcome === 'overload');
+  if (maxFaults === 1 || !latest) return shared(probabilities);
+  const energised = energisedSections(tree, latest.open);
+  const within = probabilities.map((probability, index) => (energised[index] ? probability : 0));
+  // A point barred since then can join what was energised to what was not.
+  return shared(within.some((probability) => probability > 0) ? within : probabilities);
 }
 
-function smallestOverload(
-  tree: SectionTree,
-  probabilities: readonly number[],
-  readings: readonly Reading[],
-): boolean[] | null {
-  let smallest: boolean[] | null = null;
-  let least = Infinity;
-  for (const { open, outcome } of readings) {
-    if (outcome !== 'overload') continue;
-    const energised = energisedSections(tree, open);
-    const inQuestion = energised.filter((on, index) => on && (probabilities[index] ?? 0) > 0);
-    if (inQuestion.length > 0 && inQuestion.length < least) {
-      least = inQuestion.length;
-      smallest = energised;
-    }
-  }
-  return smallest;
+function shared(weights: readonly number[]): number[] {
+  const sum = weights.reduce((total, weight) => total + weight, 0);
+  return weights.map((weight) => weight / sum);
 }

@@ -34,3 +34,5 @@ export { traceMachine, type TraceSnapshot, type TraceTag } from './traceMachine'
 export { type TraceFault, type TraceFaultCode, type TraceReading } from './reading/faults';
 export { readTraceEvent } from './reading/readTraceEvent';
 export { readTraceRecord } from './reading/readTraceRecord';
+export { playTrace } from './play/playTrace';
+export type { HiddenShort, PlayOptions, TraceStory } from './play/story';

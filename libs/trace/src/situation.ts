@@ -81,22 +81,29 @@ function work(context: TraceContext): Situation | null {
   const barred = new Set(context.barred.map(({ point }) => point));
   const tree = treeOf(context, circuit, barred);
   const fine = fineTree(context, circuit, barred, readings) ?? tree;
-  const known = believe(fine, readings, options(context));
-  const belief = fine === tree ? known : coarsen(known, fine, tree);
-  const timing = timingOf(context);
+  const finely = believe(fine, readings, options(context));
+  const belief = fine === tree ? finely : coarsen(finely, fine, tree);
   return {
     tree,
     readings,
     belief,
     sectionsInQuestion: belief.inQuestion,
-    placesInQuestion: placesInQuestion(fine, known, tree),
-    placesCleared: placesCleared(fine, known, readings),
-    timing,
-    question: belief.contradicted
-      ? null
-      : { tree, probabilities: focus(context, tree, belief, readings), open: context.open, timing },
+    placesInQuestion: placesInQuestion(fine, finely, tree),
+    placesCleared: placesCleared(fine, finely, readings),
+    timing: timingOf(context),
+    question: belief.contradicted ? null : questionOf(context, tree, belief, readings),
     known: knownSection(context, belief),
   };
+}
+
+function questionOf(
+  context: TraceContext,
+  tree: SectionTree,
+  belief: Belief,
+  readings: readonly Reading[],
+): Question {
+  const probabilities = focus(tree, belief, readings, context.maxFaults);
+  return { tree, probabilities, open: context.open, timing: timingOf(context) };
 }
 
 /** How the shop's detection probabilities apply now. */
