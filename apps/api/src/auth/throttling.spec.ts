@@ -1,0 +1,38 @@
+import { OTHER_TECHNICIAN, startTestServer, TECHNICIAN } from '../../test/test-server';
+import { verifyPassword } from './passwords';
+import * as passwords from './passwords';
+
+it('answers guessing with 429 and how long to wait, even for the right password', async () => {
+  const server = await startTestServer();
+  const attempt = (password: string) =>
+    server.client().post('/api/auth/sign-in').send({ email: TECHNICIAN, password });
+  for (let i = 0; i < 5; i++) await attempt('a guess').expect(401);
+
+  const { body, headers } = await attempt('thornwick-demo').expect(429);
+  expect(body).toMatchObject({ reason: 'tooManyRequests', status: 429 });
+  expect(body.retryAfter).toBeGreaterThanOrEqual(1);
+  expect(headers['retry-after']).toBe(String(body.retryAfter));
+  await server.signedIn(OTHER_TECHNICIAN);
+  await server.close();
+});
+
+it('limits how often one person may ask, and others not', async () => {
+  const server = await startTestServer({ requestsPerMinute: 5 });
+  const technician = await server.signedIn(TECHNICIAN);
+  const other = await server.signedIn(OTHER_TECHNICIAN);
+  for (let i = 0; i < 5; i++) await technician.get('/api/auth/account').expect(200);
+  const { body, headers } = await technician.get('/api/auth/account').expect(429);
+  expect(body.reason).toBe('tooManyRequests');
+  expect(Number(headers['retry-after'])).toBe(body.retryAfter);
+  await other.get('/api/auth/account').expect(200);
+  await server.close();
+});
+
+it('checks a password of an unknown account as thoroughly as one of a known', async () => {
+  const argon2 = jest.requireActual<typeof import('@node-rs/argon2')>('@node-rs/argon2');
+  const hash = await passwords.hashPassword('some password');
+  expect(await verifyPassword(null, 'a password that no account has')).toBe(false);
+  expect(await verifyPassword(hash, 'some password')).toBe(true);
+  expect(await verifyPassword(hash, 'another')).toBe(false);
+  expect(await argon2.verify(hash, 'some password')).toBe(true);
+});
