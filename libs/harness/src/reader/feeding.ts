@@ -14,7 +14,7 @@ export function judgeFeeding(parts: readonly PartDraft[], wiring: Wiring, faults
     }
   }
   for (const part of parts) {
-    if (part.id === undefined || wiring.partById.get(part.id) !== part) continue;
+    if (part.id === undefined || !wiring.partById.has(part.id)) continue;
     const circuits = wired.get(part.id);
     if (circuits) judgeLoads(part, fed.get(part.id) ?? new Set(), circuits, wiring, faults);
     else if (part.kind !== 'inlet' && wiring.hasInlet && !wiring.anyIncomplete) {

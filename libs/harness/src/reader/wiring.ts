@@ -20,14 +20,16 @@ export interface Wiring {
   anyIncomplete: boolean;
   hasInlet: boolean;
   circuits: ReadonlySet<string>;
+  /** Without those whose id is given twice. */
   partById: ReadonlyMap<string, PartDraft>;
 }
 
 /** Lays out the runs that make sense by themselves, and reports those that do not. */
 export function layWiring(document: DocumentDraft, identity: Identity, faults: FaultList): Wiring {
   const partById = new Map<string, PartDraft>();
-  for (const part of document.parts ?? []) if (part.id !== undefined) partById.set(part.id, part);
-
+  for (const part of document.parts ?? []) {
+    if (part.id !== undefined && !identity.twiceParts.has(part.id)) partById.set(part.id, part);
+  }
   const edges = new Map<string, Edge[]>();
   const gaps = new Set<string>();
   let gapAnywhere = !document.runs || !document.parts;
@@ -43,7 +45,7 @@ export function layWiring(document: DocumentDraft, identity: Identity, faults: F
       faults.add({ ...subject, code: 'runToItself', found: to });
     } else if (partById.get(to)?.kind === 'inlet') {
       faults.add({ ...subject, path: `${path}.to`, code: 'runIntoInlet', found: to });
-    } else if (firm(from) && firm(to)) {
+    } else if (partById.has(from) && partById.has(to)) {
       for (const circuit of known) appendTo(edges, circuit, { path, run: id, from, to });
       continue;
     }
@@ -53,12 +55,8 @@ export function layWiring(document: DocumentDraft, identity: Identity, faults: F
     edges,
     incomplete: (circuit) => gapAnywhere || gaps.has(circuit),
     anyIncomplete: gapAnywhere || gaps.size > 0,
-    hasInlet: [...partById.values()].some((part) => part.kind === 'inlet'),
+    hasInlet: (document.parts ?? []).some((part) => part.kind === 'inlet'),
     circuits: identity.circuits ?? new Set(),
     partById,
   };
-
-  function firm(part: string): boolean {
-    return partById.has(part) && !identity.twiceParts.has(part);
-  }
 }
