@@ -42,7 +42,8 @@ export function bestOf(choices: readonly Choice[]): Choice | undefined {
 }
 
 /**
- * Which of the open points stay open: none, all but one, only one, and the heaviest ones that together are about half.
+ * Which of the open points stay open: none, all but one, only one, the heaviest ones that together are about half, and
+ * all: with a short that comes and goes, or after a change of circuit, what is open now may still tell something.
  * O(open points) sets.
  */
 function basesOf(bench: Workbench, situation: Situation): number[][] {
@@ -53,7 +54,7 @@ function basesOf(bench: Workbench, situation: Situation): number[][] {
     (a, b) => (bench.beyond[b] ?? 0) - (bench.beyond[a] ?? 0) || a - b,
   );
   const ascending = (some: number[]) => some.sort((a, b) => a - b);
-  const bases = [[], ...open.map((one) => open.filter((other) => other !== one))];
+  const bases = [[], [...open], ...open.map((one) => open.filter((other) => other !== one))];
   if (open.length > 2) bases.push(...open.map((one) => [one]));
   for (let kept = 2; kept < open.length - 1; kept += 1) {
     bases.push(ascending(byWeight.slice(0, kept)));
