@@ -1,5 +1,13 @@
+export { adviceFor } from './adviceFor';
+export type { Alternative } from './alternatives';
+export { after } from './after';
 export { ANOTHER_SHORT_FACTOR, believe } from './belief';
 export { closingSeconds, pointsOf, powerUpSeconds } from './costs';
+export { explain } from './explain';
+export type { Aftermath, Explanation, KnownFacts, PowerUpFacts } from './explain';
+export { firstQuestion, forecast } from './forecast';
+export type { Forecast } from './forecast';
+export { easiestFirstSeconds, halfByCountSeconds } from './habits';
 export { createPlanner, plan } from './planner';
 export type { PlannerOptions } from './planner';
 export { DEFAULT_TIMING } from './timing';

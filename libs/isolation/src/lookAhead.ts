@@ -33,6 +33,12 @@ export function lookAhead(bench: Workbench, situation: Situation, steps: number)
   return found;
 }
 
+/** Several steps worth comparing, best first, each with the length of the play behind it. */
+export function candidates(bench: Workbench, situation: Situation, most: number): Finding[] {
+  const breadth = { mostNew: 2, width: () => 1 };
+  return new Search(bench, policies, breadth, Infinity).candidates(situation, most);
+}
+
 function greedyFinding(bench: Workbench, situation: Situation): Finding {
   const policy = greedy(1);
   return {

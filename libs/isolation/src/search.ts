@@ -36,12 +36,22 @@ export class Search {
   /** The best step found, and how long its play is to the end, closing included. */
   best(situation: Situation): { step: Step; length: Length } {
     let best: { step: Step; length: Length } | undefined;
-    for (const step of this.ranked(situation)) {
+    for (const step of this.ranked(situation, this.breadth.width(situation.count))) {
       const length = this.after(situation, step, (next) => this.value(next));
       if (!best || length.weighted < best.length.weighted) best = { step, length };
     }
     if (!best) throw new Error('two cells in question that no point parts');
     return best;
+  }
+
+  /** The most promising steps, each with the length of the best play found behind it; at most `most`, best first. */
+  candidates(situation: Situation, most: number): { step: Step; length: Length }[] {
+    return this.ranked(situation, most)
+      .map((step) => ({
+        step,
+        length: this.after(situation, step, (next) => this.value(next)),
+      }))
+      .sort((a, b) => a.length.weighted - b.length.weighted);
   }
 
   private value(situation: Situation): Length {
@@ -54,13 +64,13 @@ export class Search {
     return length;
   }
 
-  private ranked(situation: Situation): Step[] {
+  private ranked(situation: Situation, most: number): Step[] {
     const steps = this.stepsOf(situation).map((step) => ({
       step,
       length: this.after(situation, step, (next) => this.basicLength(next)),
     }));
     steps.sort((a, b) => a.length.weighted - b.length.weighted);
-    return steps.slice(0, this.breadth.width(situation.count)).map(({ step }) => step);
+    return steps.slice(0, most).map(({ step }) => step);
   }
 
   private stepsOf(situation: Situation): Step[] {
