@@ -33,7 +33,7 @@ describe('readHarness', () => {
         if (reading.ok) expectWired(reading.harness);
         else for (const fault of reading.faults) expect(fault.code).toEqual(expect.any(String));
       }),
-      { numRuns: 500 },
+      { numRuns: 300 },
     );
   });
 
