@@ -47,9 +47,6 @@ const office: RouteObject[] = [
   screen('/people', async () => ({
     Component: (await import('../features/people/people-page')).PeoplePage,
   })),
-  screen('/people/:id', async () => ({
-    Component: (await import('../features/people/person-page')).PersonPage,
-  })),
   screen('/account', async () => ({
     Component: (await import('../features/account/account-page')).AccountPage,
   })),

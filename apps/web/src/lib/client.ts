@@ -7,7 +7,7 @@ import { sessionEnd } from './session-end';
 export type Query = object;
 
 interface Call {
-  method: 'get' | 'post' | 'put' | 'patch' | 'delete';
+  method: 'get' | 'post' | 'patch' | 'delete';
   path: string;
   body?: unknown;
   query?: Query;
@@ -119,7 +119,6 @@ export const api = {
     call<T>({ method: 'get', path, ...(query ? { query } : {}) }),
   post: <T>(path: string, body?: unknown, options: Pick<Call, 'refresh'> = {}) =>
     call<T>({ method: 'post', path, body, ...options }),
-  put: <T>(path: string, body: unknown) => call<T>({ method: 'put', path, body }),
   patch: <T>(path: string, body: unknown) => call<T>({ method: 'patch', path, body }),
   delete: <T = void>(path: string) => call<T>({ method: 'delete', path }),
 };

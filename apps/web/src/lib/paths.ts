@@ -11,9 +11,10 @@ export const paths = {
   trailer: (id: string) => `/trailers/${encodeURIComponent(id)}`,
   editTrailer: (id: string) => `/trailers/${encodeURIComponent(id)}/edit`,
   plans: () => '/plans',
-  importPlan: () => '/plans/import',
+  /** With an id the file becomes that plan's next revision. */
+  importPlan: (planId?: string) =>
+    planId ? `/plans/import?plan=${encodeURIComponent(planId)}` : '/plans/import',
   plan: (id: string) => `/plans/${encodeURIComponent(id)}`,
   people: () => '/people',
-  person: (id: string) => `/people/${encodeURIComponent(id)}`,
   account: () => '/account',
 } as const;

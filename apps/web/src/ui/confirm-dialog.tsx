@@ -1,7 +1,7 @@
-import { Dialog, Portal } from '@chakra-ui/react';
 import type { ReactNode } from 'react';
 import { useTranslation } from 'react-i18next';
 import { Button } from './button';
+import { Modal } from './modal';
 
 export interface ConfirmDialogProps {
   open: boolean;
@@ -28,30 +28,21 @@ export function ConfirmDialog({
 }: ConfirmDialogProps) {
   const { t } = useTranslation();
   return (
-    <Dialog.Root
+    <Modal
       role="alertdialog"
       open={open}
-      lazyMount
-      unmountOnExit
-      onOpenChange={(change) => {
-        if (!change.open) onClose();
-      }}
+      title={title}
+      onClose={onClose}
+      footer={
+        <>
+          <Button onClick={onClose}>{t('cancel')}</Button>
+          <Button look={danger ? 'overload' : 'primary'} busy={busy} onClick={onConfirm}>
+            {confirm}
+          </Button>
+        </>
+      }
     >
-      <Portal>
-        <Dialog.Backdrop />
-        <Dialog.Positioner>
-          <Dialog.Content>
-            <Dialog.Title>{title}</Dialog.Title>
-            {children && <Dialog.Body>{children}</Dialog.Body>}
-            <Dialog.Footer>
-              <Button onClick={onClose}>{t('cancel')}</Button>
-              <Button look={danger ? 'overload' : 'primary'} busy={busy} onClick={onConfirm}>
-                {confirm}
-              </Button>
-            </Dialog.Footer>
-          </Dialog.Content>
-        </Dialog.Positioner>
-      </Portal>
-    </Dialog.Root>
+      {children}
+    </Modal>
   );
 }

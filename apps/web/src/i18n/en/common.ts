@@ -58,6 +58,19 @@ export default {
     refrigeration: 'Refrigeration unit',
     solar: 'Solar panel',
   },
+  picture: {
+    circuit: 'Circuit',
+    allCircuits: 'All circuits',
+    tap: 'Tap a part to read where it is.',
+  },
+  device: {
+    this: 'This device',
+    lastUsed: 'Last used {{when}}',
+    end: 'Sign out',
+    endName: 'Sign out {{device}}',
+    ended: '{{device}} is signed out',
+  },
+  trailerState: { tank: 'No power-ups', open: 'Trace open', noPlan: 'No plan yet' },
   step: {
     intake: 'Intake',
     makeSafe: 'Make safe',

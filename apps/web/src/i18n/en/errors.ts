@@ -50,8 +50,37 @@ const refusal = {
   malformed: 'The server could not read this.',
 } as const satisfies Record<RefusalReason, string>;
 
+/** Complaints about single fields, by the code that the server gives. */
+const field = {
+  emailTaken: 'Another person has this e-mail.',
+  unitTaken: 'Another trailer has this unit number.',
+  unknownPlan: 'That plan is not there any more. Pick another.',
+  wrongPassword: 'This is not your current password.',
+  isEmail: 'This is not an e-mail address.',
+} as const;
+
+/** What the sentences about plan faults are put together from. */
+const fault = {
+  theFile: 'The file',
+  pathAndId: '{{path}} (“{{id}}”)',
+  quoted: '“{{value}}”',
+  onCircuit: 'on circuit “{{circuit}}”',
+  onNoCircuit: 'on any circuit',
+  endOfText: 'its end',
+  type: {
+    array: 'a list',
+    object: 'an object',
+    string: 'text',
+    number: 'a number',
+    boolean: 'true or false',
+    null: 'null',
+  },
+} as const;
+
 export default {
+  fault,
   problem,
+  field,
   refusal,
   network: 'No answer from the server. Check the signal and try again; nothing is lost.',
   storage: 'This device did not keep the data. Free some space, then load the page again.',

@@ -1,22 +1,22 @@
 import type {
   AccountDto,
   ChangePasswordRequest,
-  Preferences,
   SessionDto,
+  UpdateAccountRequest,
 } from '@lampwright/contracts';
 import useSWR from 'swr';
 import { api } from '../client';
 
-export const getAccount = () => api.get<AccountDto>('account');
+export const getAccount = () => api.get<AccountDto>('auth/account');
 
-export const updateAccount = (body: { name?: string; preferences?: Partial<Preferences> }) =>
-  api.patch<AccountDto>('account', body);
+export const updateAccount = (body: UpdateAccountRequest) =>
+  api.patch<AccountDto>('auth/account', body);
 
 export const changePassword = (body: ChangePasswordRequest) =>
-  api.post<void>('account/password', body);
+  api.post<void>('auth/account/password', body);
 
 export const ownSessionsKey = () => ['account', 'sessions'] as const;
 export const useOwnSessions = () =>
-  useSWR(ownSessionsKey(), () => api.get<SessionDto[]>('account/sessions'));
+  useSWR(ownSessionsKey(), () => api.get<SessionDto[]>('auth/account/sessions'));
 
-export const endOwnSession = (id: string) => api.delete(`account/sessions/${id}`);
+export const endOwnSession = (id: string) => api.delete(`auth/account/sessions/${id}`);

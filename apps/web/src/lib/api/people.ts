@@ -13,10 +13,6 @@ export const peopleKey = (query: PageQuery) => ['people', query] as const;
 export const usePeople = (query: PageQuery) =>
   useSWR(peopleKey(query), () => api.get<Page<PersonDto>>('people', query));
 
-export const personKey = (id: string) => ['people', id] as const;
-export const usePerson = (id: string) =>
-  useSWR(personKey(id), () => api.get<PersonDto>(`people/${id}`));
-
 export const createPerson = (body: CreatePersonRequest) => api.post<PersonDto>('people', body);
 
 export const updatePerson = (id: string, body: UpdatePersonRequest) =>

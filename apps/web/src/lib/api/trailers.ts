@@ -2,6 +2,7 @@ import type {
   Page,
   TrailerDto,
   TrailerListQuery,
+  UpdateTrailerRequest,
   WriteTrailerRequest,
 } from '@lampwright/contracts';
 import useSWR from 'swr';
@@ -17,5 +18,5 @@ export const useTrailer = (id: string | null) =>
 
 export const createTrailer = (body: WriteTrailerRequest) => api.post<TrailerDto>('trailers', body);
 
-export const updateTrailer = (id: string, body: WriteTrailerRequest) =>
-  api.put<TrailerDto>(`trailers/${id}`, body);
+export const updateTrailer = (id: string, body: UpdateTrailerRequest) =>
+  api.patch<TrailerDto>(`trailers/${id}`, body);
