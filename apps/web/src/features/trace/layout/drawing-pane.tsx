@@ -1,0 +1,74 @@
+import { chakra } from '@chakra-ui/react';
+import { useMemo } from 'react';
+import { HarnessDrawing, SuspicionBar } from '../../../drawing';
+import { useAccount } from '../../../lib/session-context';
+import { useTraceContext } from '../store/trace-session';
+import { useTraceWords } from '../words/use-trace-words';
+import { useOverlay } from './overlay';
+import { useMarks } from './use-marks';
+import { useSlices } from './use-slices';
+
+const Pane = chakra('div', {
+  base: {
+    display: 'flex',
+    flexDirection: 'column',
+    gap: '2.5',
+    flex: '1',
+    minHeight: '0',
+    padding: { base: '2', md: '4' },
+    paddingBottom: { md: '2.5' },
+  },
+});
+const Picture = chakra('div', {
+  base: { flex: '1', minHeight: { base: '168px', md: '0' }, height: { base: '168px', md: 'auto' } },
+});
+const Legend = chakra('p', {
+  base: {
+    display: { base: 'none', md: 'flex' },
+    flexWrap: 'wrap',
+    columnGap: '5',
+    fontSize: 'sm',
+    color: 'fg.muted',
+  },
+});
+
+/** The trailer with what is known drawn on it, and the suspicion as a bar under it. */
+export function DrawingPane() {
+  const t = useTraceWords();
+  const { lengths } = useAccount().preferences;
+  const overlay = useOverlay();
+  const harness = useTraceContext((context) => context.record.plan.harness);
+  const current = useTraceContext((context) => context.circuit);
+  const marks = useMarks(overlay);
+  const { slices, inQuestion, cleared } = useSlices();
+  const circuit = overlay.circuit ?? current;
+  const picking = useMemo(
+    () => ({
+      ...(overlay.onPick ? { onPick: overlay.onPick } : {}),
+      ...(overlay.pickable ? { pickable: overlay.pickable } : {}),
+    }),
+    [overlay.onPick, overlay.pickable],
+  );
+  return (
+    <Pane role="group" aria-label={t('page.drawing')}>
+      <Picture>
+        <HarnessDrawing
+          harness={harness}
+          circuit={circuit}
+          marks={marks}
+          lengths={lengths}
+          {...picking}
+        />
+      </Picture>
+      {slices.length > 0 && (
+        <>
+          <SuspicionBar slices={slices} />
+          <Legend>
+            <span>{t('narrow.inQuestion', { count: inQuestion })}</span>
+            <span>{t('narrow.cleared', { count: cleared })}</span>
+          </Legend>
+        </>
+      )}
+    </Pane>
+  );
+}

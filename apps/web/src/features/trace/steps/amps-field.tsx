@@ -1,0 +1,45 @@
+import {
+  energisedParts,
+  expectedAmps,
+  sectionTree,
+  type CircuitId,
+  type PartId,
+} from '@lampwright/harness';
+import { useMemo } from 'react';
+import { TextInput } from '../../../ui';
+import { useTraceContext } from '../store/trace-session';
+import { useTraceWords } from '../words/use-trace-words';
+
+interface AmpsFieldProps {
+  circuit: CircuitId;
+  /** What is open while power is on. */
+  open: readonly PartId[];
+  value: string;
+  onChange: (value: string) => void;
+}
+
+/** Amps for those who have a meter on it, with what a healthy circuit would draw beside. */
+export function AmpsField({ circuit, open, value, onChange }: AmpsFieldProps) {
+  const t = useTraceWords();
+  const harness = useTraceContext((context) => context.record.plan.harness);
+  const expected = useMemo(() => {
+    const energised = energisedParts(sectionTree(harness, circuit), open);
+    return expectedAmps(harness, circuit, energised);
+  }, [harness, circuit, open]);
+  return (
+    <TextInput
+      size="field"
+      inputMode="decimal"
+      label={t('confirm.amps')}
+      hint={t('confirm.ampsExpected', { amps: expected.toFixed(1) })}
+      value={value}
+      onChange={(event) => onChange(event.target.value)}
+    />
+  );
+}
+
+/** What was typed as amps, by comma or point; nothing where it is no number. */
+export function readAmps(text: string): { amps?: number } {
+  const amps = Number.parseFloat(text.trim().replace(',', '.'));
+  return Number.isFinite(amps) && amps >= 0 ? { amps } : {};
+}
