@@ -1,8 +1,12 @@
-import { cautionsFor, cautionsLeft, cautionsOf } from '../cautions';
+import { cautionsLeft, cautionsOf } from '../cautions';
+import type { Feed } from '../feed';
 import { own } from '../own';
 import { isUnchanged } from '../powerUps';
 import { refuse, refuseIfAny, type Rule } from './rule';
 import { ruleForCircuits } from './things';
+
+/** Any feed that puts power on the trailer. */
+const POWERED: Feed = { kind: 'fuse', atHand: false };
 
 /** A tank trailer is never powered with this program's help; there is no way past. */
 export const ruleForStatement: Rule<'intake.stated'> = (context, event) => {
@@ -12,9 +16,14 @@ export const ruleForStatement: Rule<'intake.stated'> = (context, event) => {
   return ruleForCircuits(context, event.circuits);
 };
 
-/** Only cautions that fit can be ticked: a tick under one that does not would mean nothing. */
+/**
+ * Only cautions that fit the trailer can be ticked: a tick under one that does not would mean nothing. Those about power
+ * may be ticked ahead, before an ohm-meter gives way to it.
+ */
 export const ruleForTick: Rule<'caution.ticked'> = (context, event) =>
-  cautionsFor(context).includes(event.caution) ? null : refuse('malformed', [event.caution]);
+  cautionsOf(context.record.trailer, POWERED).includes(event.caution)
+    ? null
+    : refuse('malformed', [event.caution]);
 
 export const ruleForSafety: Rule<'safety.confirmed'> = (context) =>
   refuseIfAny('cautionsLeft', cautionsLeft(context));

@@ -1,6 +1,6 @@
-import { summaryOf } from './selectors/summaryOf';
-import { situation } from './situation';
-import { Teller } from './testing/Teller';
+import { summaryOf } from '../selectors/summaryOf';
+import { situation } from '../situation';
+import { Teller } from '../testing';
 
 describe('a plain hunt', () => {
   it('goes from complaint to signature', () => {
