@@ -33,6 +33,7 @@ export async function startTestServer(change: Partial<Settings> = {}): Promise<T
     ...readSettings({}),
     dataDir,
     webDir: join(dataDir, 'web'),
+    demo: 'yard',
     logLevel: 'silent',
     requestsPerMinute: 100_000,
     ...change,

@@ -11,8 +11,8 @@ export interface Settings {
   https: boolean;
   /** Express's `trust proxy`: false, a number of hops, or a list of addresses. */
   trustProxy: boolean | number | string;
-  /** Whether an empty database is filled with the demo yard. */
-  demo: boolean;
+  /** What an empty database is filled with: the demo yard, the yard without finished traces, or one lead. */
+  demo: 'full' | 'yard' | 'none';
   /** Signs the access tokens; `null` to keep one in the data folder. */
   secret: string | null;
   logLevel: string;
@@ -37,7 +37,8 @@ export function readSettings(env: NodeJS.ProcessEnv): Settings {
     webDir: resolve(env.LAMPWRIGHT_WEB || 'dist/apps/web'),
     https: flag(env.LAMPWRIGHT_HTTPS, false),
     trustProxy: proxies(env.LAMPWRIGHT_TRUST_PROXY),
-    demo: flag(env.LAMPWRIGHT_DEMO, true),
+    demo:
+      env.LAMPWRIGHT_DEMO === 'yard' ? 'yard' : flag(env.LAMPWRIGHT_DEMO, true) ? 'full' : 'none',
     secret: env.LAMPWRIGHT_SECRET || null,
     logLevel: env.LAMPWRIGHT_LOG || 'warn',
     requestsPerMinute: wholeNumber(

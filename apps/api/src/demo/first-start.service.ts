@@ -7,6 +7,7 @@ import { Clock } from '../common/clock';
 import { SETTINGS, type Settings } from '../common/settings';
 import { DEFAULT_PREFERENCES } from '../people/default-preferences';
 import { Person } from '../people/person.entity';
+import { seedDemoTraces } from './seed-demo-traces';
 import { seedDemoYard } from './seed-demo-yard';
 
 /** An account made at this start, with the password that is shown once. */
@@ -33,9 +34,12 @@ export class FirstStartService implements OnApplicationBootstrap {
   async onApplicationBootstrap(): Promise<void> {
     const em = this.em.fork();
     if ((await em.count(Person)) > 0) return;
-    if (this.settings.demo) await seedDemoYard(em, this.clock.now());
-    else this.firstLead = await this.createFirstLead(em);
-    await em.flush();
+    await em.transactional(async (inside) => {
+      const { demo } = this.settings;
+      if (demo === 'none') this.firstLead = await this.createFirstLead(inside);
+      else await seedDemoYard(inside, this.clock.now());
+      if (demo === 'full') await seedDemoTraces(inside, this.clock.now());
+    });
   }
 
   private async createFirstLead(em: EntityManager): Promise<FirstLead> {

@@ -9,7 +9,7 @@ import { PlanRevision } from '../plans/plan-revision.entity';
 import { Trailer } from '../trailers/trailer.entity';
 import { DEMO_PASSWORD } from './demo-password';
 
-/** Fills an empty database with the demo yard. The caller flushes. */
+/** Fills an empty database with the demo yard: people, plans and trailers. */
 export async function seedDemoYard(em: EntityManager, now: Date): Promise<void> {
   for (const person of demoYard.people) {
     em.create(Person, {
@@ -45,4 +45,5 @@ export async function seedDemoYard(em: EntityManager, now: Date): Promise<void> 
       plan: em.getReference(Plan, planId),
     });
   }
+  await em.flush();
 }

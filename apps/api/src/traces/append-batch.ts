@@ -1,5 +1,5 @@
 import type { AppendResult } from '@lampwright/contracts';
-import { appendEvent, type TraceEvent, type TraceLog } from '@lampwright/trace';
+import { appendEvent, readTraceEvent, type TraceEvent, type TraceLog } from '@lampwright/trace';
 
 /** What became of a batch: the answers, the events to store, and the trace with them. */
 export interface BatchOutcome {
@@ -34,7 +34,7 @@ function appendOne(
   refused: boolean,
 ): AppendResult {
   const { id } = event;
-  if (foreign.has(id))
+  if (foreign.has(id) || !readTraceEvent(event).ok)
     return { id, outcome: 'refused', refusal: { reason: 'malformed', ids: [id] } };
   const appended = appendEvent(outcome.log, event);
   if (appended.ok && appended.duplicate) return { id, outcome: 'duplicate' };

@@ -4,12 +4,23 @@ import { PlanRevision } from '../plans/plan-revision.entity';
 import { StoredEvent } from './stored-event.entity';
 import type { Trace } from './trace.entity';
 
-/** The record of a trace: its surroundings as they stood, and its events in the order of their acceptance. */
+/**
+ * The record of a trace: its surroundings as they stood, and its events in the order of their acceptance. It is read
+ * only, so the ORM need not watch it.
+ */
 export async function loadRecord(em: EntityManager, trace: Trace): Promise<TraceRecord> {
   const revision = await em.findOneOrFail(PlanRevision, trace.planRevision.id, {
     populate: ['harness'],
+    disableIdentityMap: true,
   });
-  const events = await em.find(StoredEvent, { trace }, { orderBy: { position: 'asc' } });
+  const events = await em.find(
+    StoredEvent,
+    { trace },
+    {
+      orderBy: { position: 'asc' },
+      disableIdentityMap: true,
+    },
+  );
   return {
     format: trace.format,
     id: trace.id,
