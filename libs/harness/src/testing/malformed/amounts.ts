@@ -1,6 +1,6 @@
 import { withCircuit, withPart, withRun, type MalformedPlan } from './damage';
 
-/** Plans with numbers that cannot be. Those that are not finite come from a program: JSON has no word for them. */
+/** Plans with numbers that cannot be. NaN comes only from a program: JSON has no word for it. */
 export const misnumberedPlans: MalformedPlan[] = [
   {
     name: 'a run of -2 metres',

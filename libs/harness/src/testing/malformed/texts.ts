@@ -5,7 +5,7 @@ import { goodPlan } from './goodPlan';
 
 const good = JSON.stringify(goodPlan, null, 2);
 
-/** Texts that are not JSON, or not of a size or depth that anyone reads. */
+/** Texts that are not JSON, or that hold what nobody reads: too much, too deep, beyond all numbers. */
 export const unreadableTexts: MalformedPlan[] = [
   {
     name: 'an empty file',
@@ -43,6 +43,11 @@ export const unreadableTexts: MalformedPlan[] = [
     name: 'NaN, for which JSON has no word',
     text: '{ "metres": NaN }',
     faults: [{ code: 'notJson', path: '', line: 1, column: 13, found: 'N' }],
+  },
+  {
+    name: 'a number beyond all numbers',
+    text: good.replace('"metres": 6', '"metres": 1e999'),
+    faults: [{ code: 'notFinite', path: 'runs[0].metres', id: 'w1', found: 'Infinity' }],
   },
   {
     name: 'a file that is too large',
