@@ -1,60 +1,42 @@
-import { colours } from './drawing-colours';
 import type { Cut } from './cuts';
+import { colours } from './drawing-colours';
+import type { Point } from './layout/geometry';
 import type { PlacedFlag } from './layout/place-flags';
 
 interface Props {
   cuts: readonly Cut[];
   flags: readonly PlacedFlag[];
-  fontSize: number;
 }
 
-/** The cut: an amber dashed line with an inked edge across the point to be opened, and a flag that names it. */
-export function CutLines({ cuts, flags, fontSize }: Props) {
+/** The cut: an amber dashed line with a darker edge square across the wire, and a thin line to its flag. */
+export function CutLines({ cuts, flags }: Props) {
   return (
-    <g aria-hidden>
+    <g aria-hidden fill="none" strokeLinejoin="round">
       {cuts.map((cut) => {
         const flag = flags.find((placed) => placed.id === cut.id);
-        const [start, end] = cut.line;
-        const anchor = flag
-          ? {
-              x: flag.box.x + flag.box.width / 2,
-              y: flag.edge === 'top' ? flag.box.y + flag.box.height : flag.box.y,
-            }
-          : start;
-        const inside = flag
-          ? Math.min(Math.max(end.x, flag.box.x + 8), flag.box.x + flag.box.width - 8)
-          : start.x;
-        const path = `M${inside} ${anchor.y}L${start.x} ${start.y}L${end.x} ${end.y}`;
+        const stroke = `M${cut.stroke[0].x} ${cut.stroke[0].y}L${cut.stroke[1].x} ${cut.stroke[1].y}`;
         return (
-          <g key={cut.id} className="lw-cut-line" fill="none" strokeLinejoin="round">
-            <path d={path} stroke={colours.sheet} strokeWidth={8} opacity={0.85} />
-            <path d={path} stroke={colours.amberEdge} strokeWidth={5} strokeDasharray="14 7" />
-            <path d={path} stroke={colours.amber} strokeWidth={3} strokeDasharray="14 7" />
+          <g key={cut.id} className="lw-cut-line" data-cut={cut.id}>
+            {flag && (
+              <>
+                <path d={leaderPath(cut.leader, flag)} stroke={colours.sheet} strokeWidth={5} />
+                <path d={leaderPath(cut.leader, flag)} stroke={colours.flag} strokeWidth={2} />
+              </>
+            )}
+            <path d={stroke} stroke={colours.sheet} strokeWidth={10} opacity={0.9} />
+            <path d={stroke} stroke={colours.amberEdge} strokeWidth={5.5} strokeDasharray="14 7" />
+            <path d={stroke} stroke={colours.amber} strokeWidth={3.5} strokeDasharray="14 7" />
           </g>
         );
       })}
-      {flags.map((flag) => (
-        <g key={flag.id}>
-          <rect {...flag.box} rx={8} fill={colours.flag} />
-          <rect
-            x={flag.box.x + 10}
-            y={flag.edge === 'top' ? flag.box.y + flag.box.height - 3 : flag.box.y}
-            width={flag.box.width - 20}
-            height={3}
-            fill={colours.amber}
-          />
-          <text
-            x={flag.box.x + flag.box.width / 2}
-            y={flag.box.y + flag.box.height / 2 + fontSize * 0.34}
-            textAnchor="middle"
-            fontSize={fontSize}
-            fontWeight={700}
-            fill={colours.onFlag}
-          >
-            {flag.text}
-          </text>
-        </g>
-      ))}
     </g>
   );
+}
+
+/** To the flag straight where it stands over the leader's end, else slanting to its near corner. */
+function leaderPath(leader: readonly Point[], { box, edge }: PlacedFlag): string {
+  const end = leader.at(-1) ?? { x: box.x, y: box.y };
+  const x = Math.min(Math.max(end.x, box.x + 10), box.x + box.width - 10);
+  const y = edge === 'top' ? box.y + box.height : box.y;
+  return `M${leader.map((point) => `${point.x} ${point.y}`).join('L')}L${x} ${y}`;
 }

@@ -1,11 +1,13 @@
 import { useId, useMemo } from 'react';
 import { useTranslation } from 'react-i18next';
 import { connectedParts } from './connected-parts';
+import { CutFlags } from './cut-flags';
 import { CutLines } from './cut-lines';
 import { cutsOf } from './cuts';
 import './drawing.css';
 import { DrawingFooter } from './drawing-footer';
 import { FoundWires } from './found-wires';
+import type { Point } from './layout/geometry';
 import { layoutHarness } from './layout/layout-harness';
 import { placeFlags } from './layout/place-flags';
 import { shortName } from './layout/label-lines';
@@ -26,8 +28,6 @@ import { useSize } from './use-size';
 import { useZoom } from './use-zoom';
 import { Wires } from './wires';
 import { colours } from './drawing-colours';
-
-const FLAG_HEIGHT = 34;
 
 /** The trailer from above, nose left, with its harness to scale and what is known of it. */
 export function HarnessDrawing(props: HarnessDrawingProps) {
@@ -57,17 +57,20 @@ export function HarnessDrawing(props: HarnessDrawingProps) {
   );
   const ink = 1 / Math.sqrt(settled);
   const fontSize = Math.min(15, Math.max(12, sheet.width / 48));
-  const flagHeight = sheet.height < 400 || compact ? 28 : FLAG_HEIGHT;
 
-  const screen = (id: string) => {
-    const at = layout.positions.get(id);
-    return at && { x: transform.applyX(at.x), y: transform.applyY(at.y) };
-  };
+  const screen = new Map(
+    [...layout.positions].map(([id, at]): [string, Point] => [
+      id,
+      { x: transform.applyX(at.x), y: transform.applyY(at.y) },
+    ]),
+  );
   const { deck } = layout.frame;
+  const roomy = !compact && sheet.height >= 400;
   const cuts = cutsOf({
     parts: layout.parts,
     cut: marks.cut,
     screen,
+    turn: (id) => layout.turns.get(id) ?? 0,
     deck: {
       x: transform.applyX(deck.x),
       y: transform.applyY(deck.y),
@@ -75,36 +78,35 @@ export function HarnessDrawing(props: HarnessDrawingProps) {
       height: deck.height * transform.k,
     },
     symbol: layout.symbol * Math.sqrt(transform.k),
+    below: roomy,
     wording: ({ label }, alone) => {
       const code = shortName(label) ?? label;
-      const says = (name: string) => t(alone ? 'partHere' : 'partToo', { label: name });
-      return [says(code), code];
+      return [t(alone ? 'partHere' : 'partToo', { label: code }), code];
     },
   });
-  const row = { height: flagHeight, left: 6, right: sheet.width - 6 };
+  const row = { height: roomy ? 34 : 28, left: 6, right: sheet.width - 6 };
   const flags = [
     ...placeFlags(cuts, 'top', { ...row, y: 6 }, fontSize + 2),
-    ...placeFlags(cuts, 'bottom', { ...row, y: sheet.height - flagHeight - 6 }, fontSize + 2),
+    ...placeFlags(cuts, 'bottom', { ...row, y: sheet.height - row.height - 24 }, fontSize + 2),
   ];
+  const flagBelow = flags.some((flag) => flag.edge === 'bottom');
+  const under = deck.y + deck.height + 34;
   const dimensionY =
-    !compact && sheet.height >= 400 ? Math.min(sheet.height - 30, deck.y + deck.height + 48) : null;
+    roomy && !flagBelow && !layout.extent.inferred && under <= sheet.height - 38 ? under : null;
 
   const labels = useLabels({
     layout,
     marks,
     pickable,
     few: compact,
-    flagged: new Set(flags.map((flag) => flag.id)),
+    flags,
     size: fontSize / settled,
     ink,
     compact,
     dimensionY,
   });
   const points = new Map(
-    layout.parts.flatMap((part) => {
-      const at = screen(part.id);
-      return at && onPick && (!pickable || pickable.has(part.id)) ? [[part.id, at] as const] : [];
-    }),
+    [...screen].filter(([id]) => onPick !== undefined && (!pickable || pickable.has(id))),
   );
 
   return (
@@ -118,7 +120,7 @@ export function HarnessDrawing(props: HarnessDrawingProps) {
               lengthMetres={layout.extent.length}
             />
             {!compact && <SheetTexts texts={labels.texts} size={fontSize * 0.9} />}
-            {dimensionY !== null && !layout.extent.inferred && (
+            {dimensionY !== null && (
               <LengthDimension
                 deck={deck}
                 y={dimensionY}
@@ -145,6 +147,9 @@ export function HarnessDrawing(props: HarnessDrawingProps) {
               ink={ink * layout.weight}
             />
             <FoundWires layout={layout} places={marks.places} ink={ink} />
+          </g>
+          <CutLines cuts={cuts} flags={flags} />
+          <g transform={transform.toString()}>
             <Parts
               layout={layout}
               marks={marks}
@@ -160,7 +165,7 @@ export function HarnessDrawing(props: HarnessDrawingProps) {
               size={fontSize / settled}
             />
           </g>
-          <CutLines cuts={cuts} flags={flags} fontSize={fontSize + 2} />
+          <CutFlags flags={flags} fontSize={fontSize + 2} />
           {!compact && (
             <ScaleRow
               sheet={sheet}

@@ -1,8 +1,8 @@
 import type { Part, PartId } from '@lampwright/harness';
 import type { Point } from './layout/geometry';
-import { labelVariants } from './layout/label-lines';
+import { labelVariants, shortName } from './layout/label-lines';
 import type { LabelRequest } from './layout/place-labels';
-import type { DrawingMarks } from './marks';
+import type { DrawingMarks, PlaceMark } from './marks';
 import { partMarks } from './place-marks';
 
 interface Input {
@@ -16,6 +16,8 @@ interface Input {
   flagged: ReadonlySet<PartId>;
   /** Only what is cut, found or open. */
   few: boolean;
+  /** Magnified enough to write out the names of splices, which no one can open. */
+  near: boolean;
   /** The words for a part that is open or found, and the label of any other. */
   wording: (part: Part, what: 'open' | 'found' | 'plain') => string;
 }
@@ -39,18 +41,27 @@ export function labelRequests(input: Input): LabelRequest[] {
         : what === 'open'
           ? 2
           : 3 + (mark === 'inQuestion' ? 0 : 3) + rank(part, input.pickable);
-    const variants = labelVariants(part.label, at + 1);
+    const code = shortName(part.label);
+    const brief = part.kind === 'splice' && !input.near;
+    const variants = brief ? (code ? [[code]] : []) : labelVariants(part.label, at + 1);
     return [
       {
         id: part.id,
         at: point,
-        reach: part.kind === 'splice' && mark !== 'found' ? input.reach * 0.5 : input.reach,
+        reach: input.reach * reachOf(part, mark),
         variants: leading ? [[input.wording(part, what)], ...variants] : variants,
         priority,
         bold: leading,
+        mayLead: leading || mark === 'inQuestion' || part.kind === 'inlet',
       },
     ];
   });
+}
+
+/** A splice is a small dot; rings stand around what was found. */
+function reachOf(part: Part, mark: PlaceMark): number {
+  if (mark === 'found') return 2.5;
+  return part.kind === 'splice' ? 0.5 : 1;
 }
 
 function rank(part: Part, pickable: (part: PartId) => boolean): number {

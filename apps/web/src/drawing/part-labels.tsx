@@ -40,9 +40,20 @@ export function PartLabels({ labels, parts, positions, places, size }: Props) {
                 strokeWidth={size / 15}
               />
             )}
+            {label.bold && (
+              <rect
+                x={box.x - size * 0.25}
+                y={box.y - size * 0.04}
+                width={box.width + size * 0.5}
+                height={box.height + size * 0.08}
+                rx={size * 0.25}
+                fill={mark === 'found' ? colours.emberWash : colours.paper}
+                opacity={0.94}
+              />
+            )}
             <text
               fill={fill}
-              stroke={colours.paper}
+              stroke={label.bold ? 'none' : colours.paper}
               strokeWidth={size * 0.26}
               strokeLinejoin="round"
               paintOrder="stroke"

@@ -4,10 +4,9 @@ import { colours } from './drawing-colours';
 import { LampResultBadge } from './lamp-result-badge';
 import type { DrawingLayout } from './layout/layout-harness';
 import { paintOrder } from './mark-style';
-import type { DrawingMarks } from './marks';
+import type { DrawingMarks, PlaceMark } from './marks';
 import { PartSymbol } from './part-symbol';
 import { partMarks } from './place-marks';
-import { turnOf } from './turn-of';
 
 interface Props {
   layout: DrawingLayout;
@@ -22,10 +21,13 @@ interface Props {
 export function Parts({ layout, marks, connected, offered, ink }: Props) {
   const size = layout.symbol * ink;
   const open = new Set(marks.open);
-  const feeds = new Map(layout.runs.map((run) => [run.to, layout.routes.get(run.id)]));
+  const cut = new Set(marks.cut);
   const drawn = layout.parts
     .map((part) => ({ part, of: partMarks(part, marks.places), at: layout.positions.get(part.id) }))
-    .sort((a, b) => paintOrder.indexOf(a.of.whole) - paintOrder.indexOf(b.of.whole));
+    .sort((a, b) => level(a) - level(b));
+  function level({ part, of }: { part: { id: PartId }; of: { whole: PlaceMark } }) {
+    return paintOrder.indexOf(of.whole) + (cut.has(part.id) ? paintOrder.length : 0);
+  }
   return (
     <g>
       {drawn.map(({ part, of, at }) => {
@@ -54,9 +56,9 @@ export function Parts({ layout, marks, connected, offered, ink }: Props) {
             <PartSymbol
               part={part}
               marks={of}
-              size={size}
+              size={cut.has(part.id) ? size * 1.3 : size}
               open={open.has(part.id)}
-              turn={turnOf(feeds.get(part.id), layout.symbol)}
+              turn={layout.turns.get(part.id) ?? 0}
               ink={ink}
             />
             {result && <LampResultBadge result={result} size={size} />}

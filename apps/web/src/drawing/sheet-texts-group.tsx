@@ -6,11 +6,11 @@ export function SheetTexts({ texts, size }: { texts: readonly SheetText[]; size:
   const { t } = useTranslation('drawing');
   return (
     <g aria-hidden fontSize={size} fill={colours.muted} letterSpacing={0.2}>
-      {texts.map(({ key, at, turn }) => (
+      {texts.map(({ key, at, turn, anchor }) => (
         <text
           key={key}
           transform={`translate(${at.x} ${at.y}) rotate(${turn})`}
-          textAnchor={turn ? 'middle' : 'start'}
+          textAnchor={anchor}
         >
           {t(key)}
         </text>

@@ -4,8 +4,8 @@ import type { Extent } from './extent';
 export type Zone = 'front' | 'deck' | 'rear';
 
 /** How near to an end a part lies on that end's face, metres. */
-const FACE_DEPTH = 0.3;
-/** Fewer parts than this read well from above. */
+const FACE_DEPTH = 0.45;
+/** Fewer lamps than this read well from above. */
 const CROWD = 4;
 /** The height that a part without one is taken to have, metres. */
 const USUAL_HEIGHT = 1;
@@ -30,7 +30,7 @@ export function zonesOf(parts: readonly Part[], extent: Extent): Map<string, Zon
 }
 
 function isCrowd(parts: readonly Part[]): boolean {
-  return parts.length >= CROWD;
+  return parts.filter((part) => part.kind === 'lamp').length >= CROWD;
 }
 
 function isSideLamp(part: Part): boolean {

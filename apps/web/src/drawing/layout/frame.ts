@@ -31,7 +31,7 @@ export interface FaceWidths {
 }
 
 /** A trailer is far longer than wide; across it may be drawn this many times wider than along. */
-const MOST_STRETCH = 4.5;
+const MOST_STRETCH = 3;
 
 /** Fits the trailer into the sheet: to one scale along, to another across where that reads better. */
 export function frameOf(extent: Extent, sheet: Size, margins: Margins, faces: FaceWidths): Frame {
@@ -51,5 +51,15 @@ export function frameOf(extent: Extent, sheet: Size, margins: Margins, faces: Fa
     rear: face(x + deckWidth, faces.rear),
     alongScale,
     acrossScale,
+  };
+}
+
+/** The deck with its folded-out faces. */
+export function wholeOf({ deck, front, rear }: Frame): Box {
+  return {
+    x: deck.x - (front?.width ?? 0),
+    y: deck.y,
+    width: deck.width + (front?.width ?? 0) + (rear?.width ?? 0),
+    height: deck.height,
   };
 }

@@ -34,6 +34,10 @@ export function boxInside(inner: Box, outer: Box): boolean {
   );
 }
 
+export function pointInside({ x, y }: Point, box: Box): boolean {
+  return x >= box.x && y >= box.y && x <= box.x + box.width && y <= box.y + box.height;
+}
+
 export function growBox(box: Box, by: number): Box {
   return { x: box.x - by, y: box.y - by, width: box.width + 2 * by, height: box.height + 2 * by };
 }

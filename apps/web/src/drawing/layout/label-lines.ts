@@ -1,19 +1,22 @@
 /** Beyond this many letters a label is also offered on two lines. */
-const LONG = 11;
+const LONG = 9;
 
 /** A plan's short name for a part: a leading code such as "P3" or "LH12"; else `null`. */
 export function shortName(label: string): string | null {
   return /^[\p{Lu}]{1,3}-?\d{1,3}[a-z]?(?=\s|$)/u.exec(label)?.[0] ?? null;
 }
 
-/** The ways a label may be written, best first: in full, on two lines, by its code, by its number in the list. */
+/**
+ * The ways a label may be written, best first: without the clause after its last comma, which in practice names the
+ * side that the drawing shows anyway; on two lines; by its code, or by its number in the list.
+ */
 export function labelVariants(label: string, number: number): string[][] {
+  const short = label.replace(/,[^,]*$/, '');
   const code = shortName(label);
-  const variants = [[label]];
-  const halves = label.length > LONG ? twoLines(label) : null;
+  const variants = [[short]];
+  const halves = short.length > LONG ? twoLines(short) : null;
   if (halves) variants.push(halves);
-  if (code && code !== label) variants.push([code]);
-  if (!code) variants.push([String(number)]);
+  if (code !== short) variants.push([code ?? String(number)]);
   return variants;
 }
 

@@ -2,11 +2,12 @@ import type { CircuitId, Harness, Part, PartId, Run, RunId } from '@lampwright/h
 import type { DrawingTrailer } from '../marks';
 import { extentOf, type Extent } from './extent';
 import { zonesOf, type Zone } from './faces';
-import { frameOf, type Frame, type Margins, type Size } from './frame';
-import { clamp, type Point } from './geometry';
+import { frameOf, wholeOf, type Frame, type Margins, type Size } from './frame';
+import { clamp, growBox, type Point } from './geometry';
 import { routeRuns } from './route';
 import { separate } from './separate';
 import { shownHarness } from './shown-circuit';
+import { turnOf } from './turn-of';
 
 export interface LayoutInput {
   harness: Harness;
@@ -27,6 +28,8 @@ export interface DrawingLayout {
   runs: Run[];
   positions: ReadonlyMap<PartId, Point>;
   routes: ReadonlyMap<RunId, Point[]>;
+  /** By part, degrees by which its feed side is turned from the left. */
+  turns: ReadonlyMap<PartId, number>;
   /** Parts of other circuits, as dots. */
   others: Point[];
   /** Side of the square that a symbol fills. */
@@ -46,6 +49,13 @@ export function layoutHarness(input: LayoutInput): DrawingLayout {
     rear: has(zones, 'rear') ? clamp(sheet.width * 0.17, 50, 132) : 0,
   });
   const separation = separate(shown.parts, zones, frame, largestSymbol(sheet));
+  const routes = routeRuns({
+    runs: shown.runs,
+    positions: separation.positions,
+    lanes: separation.lanes,
+    symbol: separation.symbol,
+    bounds: growBox(wholeOf(frame), 1),
+  });
   return {
     sheet,
     extent,
@@ -53,7 +63,10 @@ export function layoutHarness(input: LayoutInput): DrawingLayout {
     parts: shown.parts,
     runs: shown.runs,
     positions: separation.positions,
-    routes: routeRuns(shown.runs, separation.positions, separation.lanes, separation.symbol),
+    routes,
+    turns: new Map(
+      shown.runs.map((run) => [run.to, turnOf(routes.get(run.id), separation.symbol)]),
+    ),
     others: shown.others.map((part) => ({
       x: frame.deck.x + part.at.along * frame.alongScale,
       y: frame.deck.y + frame.deck.height / 2 - part.at.across * frame.acrossScale,
@@ -69,7 +82,7 @@ function has(zones: ReadonlyMap<PartId, Zone>, zone: Zone): boolean {
 
 /** Room above for the flags of the cut, below for the scale, and around for labels. */
 function marginsOf(sheet: Size, compact: boolean): Margins {
-  const side = clamp(sheet.width * 0.03, 8, 28);
+  const side = compact ? 8 : clamp(sheet.width * 0.035, 21, 30);
   if (compact)
     return { top: sheet.height * 0.16, right: side, bottom: sheet.height * 0.08, left: side };
   const top = clamp(sheet.height * 0.16, 40, 84);

@@ -13,6 +13,8 @@ export interface LabelRequest {
   /** Lower goes first. */
   priority: number;
   bold: boolean;
+  /** True where it may stand off with a line to its symbol. */
+  mayLead: boolean;
 }
 
 export interface PlacedLabel {
@@ -28,15 +30,13 @@ export interface LabelSurroundings {
   sheet: Box;
   /** Nothing may be written over these: symbols, flags, texts of the drawing itself. */
   solid: readonly Box[];
-  /** Writing over these is allowed and avoided: wires, outlines. */
-  soft: readonly Box[];
+  /** Writing over these is allowed and avoided, the more so the higher their cost: wires, outlines. */
+  soft: readonly { box: Box; cost: number }[];
   /** Letter height in pixels of the drawing. */
   size: number;
 }
 
 export const LINE_HEIGHT = 1.16;
-/** What one line under a label costs against a worse position. */
-const SOFT_COST = 2.2;
 /** A longer way of writing is given up for a shorter one above this cost. */
 const TOO_BUSY = 9;
 
@@ -50,8 +50,8 @@ export function placeLabels(
 ): PlacedLabel[] {
   const solid = new BoxGrid<null>();
   for (const box of surroundings.solid) solid.add(box, null);
-  const soft = new BoxGrid<null>();
-  for (const box of surroundings.soft) soft.add(box, null);
+  const soft = new BoxGrid<number>();
+  for (const { box, cost } of surroundings.soft) soft.add(box, cost);
 
   const placed: PlacedLabel[] = [];
   for (const request of [...requests].sort((a, b) => a.priority - b.priority)) {
@@ -67,7 +67,7 @@ function placeOne(
   request: LabelRequest,
   { sheet, size }: LabelSurroundings,
   solid: BoxGrid<null>,
-  soft: BoxGrid<null>,
+  soft: BoxGrid<number>,
 ): PlacedLabel | null {
   for (const lines of request.variants) {
     const last = lines === request.variants.at(-1);
@@ -77,8 +77,9 @@ function placeOne(
     for (const candidate of labelCandidates(request.at, request.reach, width, height, size)) {
       if (best && candidate.cost >= best.cost) continue;
       const { box, leader } = candidate;
+      if (leader && !request.mayLead) continue;
       if (!boxInside(box, sheet) || solid.over(box).length > 0) continue;
-      const cost = candidate.cost + soft.over(box).length * SOFT_COST;
+      const cost = soft.over(box).reduce((sum, more) => sum + more, candidate.cost);
       const label = { id: request.id, lines, box, bold: request.bold, leader };
       if (!best || cost < best.cost) best = { label, cost };
     }

@@ -1,6 +1,15 @@
 import type { PartId, Run, RunId } from '@lampwright/harness';
 import { BoxGrid } from './box-grid';
-import { boxAround, growBox, segmentBox, segmentsOf, type Point, type Segment } from './geometry';
+import {
+  boxAround,
+  growBox,
+  pointInside,
+  segmentBox,
+  segmentsOf,
+  type Box,
+  type Point,
+  type Segment,
+} from './geometry';
 import { routeCandidates } from './route-candidates';
 
 interface Drawn {
@@ -13,24 +22,44 @@ const COST = {
   bend: 14,
   overSymbol: 90,
   crossing: 9,
+  againstTheGrain: 10,
   sharedWithStranger: 3,
   sharedWithSibling: -0.6,
 };
+
+export interface RouteInput {
+  /** Feed first. */
+  runs: readonly Run[];
+  positions: ReadonlyMap<PartId, Point>;
+  /** The `y` of the lanes. */
+  lanes: readonly number[];
+  symbol: number;
+  /** No wire leaves it. */
+  bounds: Box;
+}
+
+/** What is on the sheet while one run after the other is drawn. */
+interface Sheet {
+  symbols: BoxGrid<PartId>;
+  drawn: BoxGrid<Drawn>;
+  /** Parts whose own runs go on up or down rather than along. */
+  uprights: ReadonlySet<PartId>;
+  leaves: ReadonlySet<PartId>;
+}
 
 /**
  * Draws every run as level and upright pieces, feed first. Each takes the cheapest of its candidates: short, few bends,
  * clear of other parts, on the trunk of the runs that leave the same part, and beside the others. Deterministic.
  * O(runs × candidates × things near by).
  */
-export function routeRuns(
-  runs: readonly Run[],
-  positions: ReadonlyMap<PartId, Point>,
-  lanes: readonly number[],
-  symbol: number,
-): Map<RunId, Point[]> {
-  const symbols = new BoxGrid<PartId>();
-  for (const [id, at] of positions) symbols.add(boxAround(at, symbol * 1.1), id);
-  const drawn = new BoxGrid<Drawn>();
+export function routeRuns(input: RouteInput): Map<RunId, Point[]> {
+  const { runs, positions, lanes, symbol, bounds } = input;
+  const sheet: Sheet = {
+    symbols: new BoxGrid<PartId>(),
+    drawn: new BoxGrid<Drawn>(),
+    ...directions(runs, positions),
+  };
+  for (const [id, at] of positions) sheet.symbols.add(boxAround(at, symbol * 1.1), id);
   const routes = new Map<RunId, Point[]>();
   for (const run of runs) {
     const from = positions.get(run.from);
@@ -38,36 +67,58 @@ export function routeRuns(
     if (!from || !to) continue;
     let best: { route: Point[]; cost: number } | null = null;
     for (const route of routeCandidates(from, to, lanes, symbol)) {
-      const cost = costOf(route, run, symbols, drawn, best?.cost ?? Infinity);
+      if (!route.slice(1, -1).every((bend) => pointInside(bend, bounds))) continue;
+      const cost = costOf(route, run, sheet, best?.cost ?? Infinity);
       if (!best || cost < best.cost - 0.01) best = { route, cost };
     }
-    if (!best) continue;
-    routes.set(run.id, best.route);
-    for (const segment of segmentsOf(best.route)) {
-      drawn.add(growBox(segmentBox(segment), 1), { segment, from: run.from });
+    const route = best?.route ?? [from, { x: to.x, y: from.y }, to];
+    routes.set(run.id, route);
+    for (const segment of segmentsOf(route)) {
+      sheet.drawn.add(growBox(segmentBox(segment), 1), { segment, from: run.from });
     }
   }
   return routes;
 }
 
-function costOf(
-  route: readonly Point[],
-  run: Run,
-  symbols: BoxGrid<PartId>,
-  drawn: BoxGrid<Drawn>,
-  enough: number,
-): number {
-  let cost = (route.length - 2) * COST.bend;
+function directions(
+  runs: readonly Run[],
+  positions: ReadonlyMap<PartId, Point>,
+): Pick<Sheet, 'uprights' | 'leaves'> {
+  const lean = new Map<PartId, number>();
+  for (const run of runs) {
+    const from = positions.get(run.from);
+    const to = positions.get(run.to);
+    if (!from || !to) continue;
+    const upright = Math.abs(to.y - from.y) > Math.abs(to.x - from.x) ? 1 : -1;
+    lean.set(run.from, (lean.get(run.from) ?? 0) + upright);
+  }
+  return {
+    uprights: new Set([...lean].filter(([, sum]) => sum > 0).map(([id]) => id)),
+    leaves: new Set([...positions.keys()].filter((id) => !lean.has(id))),
+  };
+}
+
+function costOf(route: readonly Point[], run: Run, sheet: Sheet, enough: number): number {
+  let cost = (route.length - 2) * COST.bend + entryCost(route, run, sheet);
   for (const segment of segmentsOf(route)) {
     const box = segmentBox(segment);
     cost += box.width + box.height;
     if (cost + COST.sharedWithSibling * (box.width + box.height) > enough) return cost;
-    for (const id of symbols.over(growBox(box, 0.5))) {
+    for (const id of sheet.symbols.over(growBox(box, 0.5))) {
       if (id !== run.from && id !== run.to) cost += COST.overSymbol;
     }
-    for (const other of drawn.over(growBox(box, 1))) cost += meeting(segment, other, run);
+    for (const other of sheet.drawn.over(growBox(box, 1))) cost += meeting(segment, other, run);
   }
   return cost;
+}
+
+/** A wire should come into a plug or splice in the direction in which it goes on. */
+function entryCost(route: readonly Point[], run: Run, sheet: Sheet): number {
+  if (sheet.leaves.has(run.to)) return 0;
+  const last = route.at(-1);
+  const before = route.at(-2);
+  const upright = last !== undefined && before !== undefined && last.x === before.x;
+  return upright === sheet.uprights.has(run.to) ? 0 : COST.againstTheGrain;
 }
 
 function meeting(segment: Segment, other: Drawn, run: Run): number {

@@ -68,9 +68,11 @@ function laneOnDeck(parts: readonly Part[], frame: Frame, gap: number): Laned | 
     v: acrossToY(part, frame),
   }));
   const area = inner(frame.deck, gap);
+  // What sits at the very front, as the inlet does, may straddle the nose.
+  const nose = frame.front ? area.x : frame.deck.x;
   return laneOut(
     items,
-    { uLow: area.x, uHigh: area.x + area.width, vLow: area.y, vHigh: area.y + area.height },
+    { uLow: nose, uHigh: area.x + area.width, vLow: area.y, vHigh: area.y + area.height },
     gap,
   );
 }

@@ -1,4 +1,4 @@
-import type { Point } from './layout/geometry';
+import type { Point } from './geometry';
 
 /** Degrees by which a part is turned so that its feed side faces the wire that comes in; 0 is from the left. */
 export function turnOf(route: readonly Point[] | undefined, symbol: number): number {
