@@ -30,6 +30,7 @@ const Bar = chakra('header', {
     zIndex: 'bar',
   },
 });
+const Home = chakra(Link, { base: { display: 'flex', alignItems: 'center', minH: 'field' } });
 const Skip = chakra('a', {
   base: {
     position: 'absolute',
@@ -68,9 +69,9 @@ export function Layout() {
     <Frame>
       <Skip href="#content">{t('skipToContent')}</Skip>
       <Bar>
-        <Link to={paths.yard()}>
+        <Home to={paths.yard()}>
           <Wordmark />
-        </Link>
+        </Home>
         <MainMenu />
       </Bar>
       <div role="status">

@@ -26,3 +26,11 @@ beforeEach(() => {
   fakeIndexedDb.reset();
   vi.stubGlobal('indexedDB', fakeIndexedDb.factory);
 });
+
+// jsdom has the dialog element, but cannot open it.
+HTMLDialogElement.prototype.showModal ??= function showModal(this: HTMLDialogElement) {
+  this.open = true;
+};
+HTMLDialogElement.prototype.close ??= function close(this: HTMLDialogElement) {
+  this.open = false;
+};

@@ -1,5 +1,4 @@
 import { createSystem, defaultBaseConfig, defineConfig } from '@chakra-ui/react';
-import { dialogSlotRecipe } from './dialog-recipe';
 import { globalCss } from './global-css';
 import { semanticTokens, tokens } from './tokens';
 
@@ -7,6 +6,7 @@ import { semanticTokens, tokens } from './tokens';
 export const system = createSystem(
   defaultBaseConfig,
   defineConfig({
+    preflight: true,
     globalCss,
     theme: {
       breakpoints: { sm: '480px', md: '768px', lg: '1024px', xl: '1280px' },
@@ -16,7 +16,6 @@ export const system = createSystem(
       },
       tokens,
       semanticTokens,
-      slotRecipes: { dialog: dialogSlotRecipe },
     },
   }),
 );

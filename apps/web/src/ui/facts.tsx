@@ -4,7 +4,7 @@ import type { ReactNode } from 'react';
 const List = chakra('dl', {
   base: {
     display: 'grid',
-    gridTemplateColumns: 'minmax(7rem, auto) 1fr',
+    gridTemplateColumns: 'fit-content(11rem) 1fr',
     columnGap: '5',
     rowGap: '2.5',
     '& dt': { color: 'fg.muted' },

@@ -17,7 +17,7 @@ const Root = chakra('span', {
 /** Two lamps on one harness, and the cut between them. */
 export function Mark({ size = 34 }: { size?: number }) {
   return (
-    <svg width={size} height={size} viewBox="0 0 32 32" fill="none" aria-hidden="true">
+    <svg width={size} height={size} viewBox="1 2 30 28" fill="none" aria-hidden="true">
       <path
         d="M3 20h9.5M19.5 20H29"
         stroke="currentColor"

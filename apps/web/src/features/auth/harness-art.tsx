@@ -22,10 +22,7 @@ export function HarnessArt() {
   return (
     <Art viewBox="0 0 640 210" aria-hidden="true">
       <path className="body" d="M22 30h598q8 0 8 8v134q0 8-8 8H22q-10-75 0-150z" />
-      <path
-        className="cleared"
-        d="M14 105H390M62 105V46M62 105v118M300 105V46M300 105v59M62 105v59"
-      />
+      <path className="cleared" d="M14 105H394M62 105V46M62 105v61M300 105V46M300 105v61" />
       <path className="suspect" d="M430 105h120M550 105V52h56M550 105v53h56M550 105h56" />
       <rect className="inlet" x="6" y="94" width="20" height="22" rx="4" />
       <g className="lamp">

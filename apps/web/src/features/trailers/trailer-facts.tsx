@@ -1,8 +1,13 @@
+import { chakra } from '@chakra-ui/react';
 import type { TrailerDto } from '@lampwright/contracts';
 import { useTranslation } from 'react-i18next';
 import { formatLength } from '../../lib/format';
 import { useAccount } from '../../lib/session-context';
 import { Facts, Panel, SectionTitle } from '../../ui';
+
+const Notes = chakra('p', {
+  base: { borderTop: '1px solid', borderColor: 'line', pt: '4', whiteSpace: 'pre-line' },
+});
 
 export function TrailerFacts({ trailer }: { trailer: TrailerDto }) {
   const { t } = useTranslation(['trailers', 'common']);
@@ -19,14 +24,9 @@ export function TrailerFacts({ trailer }: { trailer: TrailerDto }) {
           [t('plate'), trailer.plate ?? t('noPlate')],
           [t('abs'), t(trailer.abs ? 'absYes' : 'absNo')],
           [t('secondSources'), sources.join(', ') || t('noSecondSources')],
-          ...(trailer.notes
-            ? ([[t('notes'), trailer.notes]] as const).map(([name, value]): [string, string] => [
-                name,
-                value,
-              ])
-            : []),
         ]}
       />
+      {trailer.notes && <Notes>{trailer.notes}</Notes>}
     </Panel>
   );
 }

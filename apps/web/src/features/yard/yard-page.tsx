@@ -28,10 +28,10 @@ export function YardPage() {
         <Column>
           <StartPanel />
           <OpenTraces />
+          <RecentTraces />
         </Column>
         <Column>
           <YardTrailers />
-          <RecentTraces />
         </Column>
       </Columns>
     </Page>
