@@ -1,10 +1,4 @@
-import {
-  energisedSections,
-  sectionTree,
-  type PartId,
-  type PlaceRef,
-  type SectionTree,
-} from '@lampwright/harness';
+import { sectionTree, type PartId, type PlaceRef, type SectionTree } from '@lampwright/harness';
 import {
   believe,
   type Belief,
@@ -16,15 +10,8 @@ import { coarsen } from './coarsen';
 import { countingPowerUps, readingOf } from './countingReadings';
 import { focus } from './focus';
 import { samePlace } from './places';
+import { placesCleared, placesInQuestion, type RatedPlace } from './ratedPlaces';
 import type { TraceContext } from './state';
-
-/** A place that may hold the short. */
-export interface RatedPlace {
-  ref: PlaceRef;
-  /** Index of its section in `Situation.tree`. */
-  section: number;
-  probability: number;
-}
 
 /** Where the narrowing of one circuit stands, computed from the context alone. */
 export interface Situation {
@@ -163,48 +150,4 @@ function knownSection(context: TraceContext, belief: Belief): number | null {
   const { detection, maxFaults } = options(context);
   const enough = detection < 1 || maxFaults > 1 ? KNOWN : CERTAIN;
   return (belief.probabilities[first] ?? 0) >= enough ? first : null;
-}
-
-function placesInQuestion(fine: SectionTree, belief: Belief, tree: SectionTree): RatedPlace[] {
-  const rated = belief.inQuestion.flatMap((index) => {
-    const section = fine.sections[index];
-    if (!section) return [];
-    const { places, weight } = section;
-    return places.map(({ ref, weight: own }) => ({
-      ref,
-      section: homeOf(tree, ref),
-      probability:
-        (belief.probabilities[index] ?? 0) * (weight > 0 ? own / weight : 1 / places.length),
-    }));
-  });
-  return rated
-    .filter(({ probability }) => probability > 0)
-    .sort((a, b) => b.probability - a.probability);
-}
-
-function homeOf(tree: SectionTree, ref: PlaceRef): number {
-  const home = tree.sections.find(({ places }) =>
-    places.some((place) => samePlace(place.ref, ref)),
-  );
-  return home?.index ?? 0;
-}
-
-/** Without doubt about the readings: what cannot hold the short. With readings at odds: what once held. */
-function placesCleared(
-  fine: SectionTree,
-  belief: Belief,
-  readings: readonly Reading[],
-): PlaceRef[] {
-  const held = belief.contradicted
-    ? readings
-        .filter(({ outcome }) => outcome === 'holds')
-        .map(({ open }) => energisedSections(fine, open))
-    : [];
-  return fine.sections
-    .filter(({ index }) =>
-      belief.contradicted
-        ? held.some((energised) => energised[index])
-        : (belief.probabilities[index] ?? 0) === 0,
-    )
-    .flatMap(({ places }) => places.map(({ ref }) => ref));
 }
