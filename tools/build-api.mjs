@@ -2,7 +2,8 @@
 import { execFileSync } from 'node:child_process';
 import { readdirSync, rmSync, writeFileSync } from 'node:fs';
 
-const out = 'dist/apps/api';
+/** Another folder below the workspace may be given. */
+const out = process.argv[2] ?? 'dist/apps/api';
 const libraries = readdirSync('libs').map((name) => `libs/${name}/src`);
 
 rmSync(out, { recursive: true, force: true });

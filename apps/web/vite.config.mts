@@ -22,6 +22,7 @@ export default defineConfig({
   build: {
     outDir: `${repo}dist/apps/web`,
     emptyOutDir: true,
+    manifest: true,
     rolldownOptions: { output: { codeSplitting: { groups: vendor } } },
   },
   test: {

@@ -1,11 +1,7 @@
 import { spawnSync } from 'node:child_process';
-import { createHash } from 'node:crypto';
-import { accessSync, constants, mkdirSync, readFileSync, writeFileSync } from 'node:fs';
-import { dirname } from 'node:path';
+import { accessSync, constants, mkdirSync } from 'node:fs';
 import { giveUp, say } from './say.mjs';
 import { at, root, textOf } from './workspace.mjs';
-
-const lockStamp = 'node_modules/.lampwright-lock';
 
 /** Ends with a message where Node.js is older than package.json's `engines` asks for. */
 export function checkNode(version = process.versions.node) {
@@ -43,22 +39,27 @@ export function run(command, args, env = {}) {
   return status === 0;
 }
 
+/** Whether node_modules holds every package of the lock file in its version, by npm's own record of what it put there. */
+function isInstalled() {
+  const record = textOf('node_modules/.package-lock.json');
+  if (!record) return false;
+  const there = JSON.parse(record).packages;
+  const wanted = JSON.parse(textOf('package-lock.json')).packages;
+  return Object.entries(wanted).every(
+    ([path, { version, optional }]) => path === '' || optional || there[path]?.version === version,
+  );
+}
+
 /** Installs what the lock file says, if that is not what is there. */
 export function install() {
-  const lock = createHash('sha256')
-    .update(readFileSync(at('package-lock.json')))
-    .digest('hex');
-  if (textOf(lockStamp) === lock) return;
+  if (isInstalled()) return;
   checkWritable(at('.'), 'The workspace');
   say(
-    'Installing packages. The database driver is compiled on the way: this takes 2 to 4 minutes, once.',
+    'Installing packages. The database driver is compiled on the way: this takes 2 to 5 minutes, once.',
   );
-  if (!run('npm', ['ci', '--no-audit', '--no-fund'])) {
-    giveUp(
-      'The packages could not be installed.',
-      'The lines above say why. Compiling the database driver wants python3, make and a C++ compiler.',
-    );
-  }
-  mkdirSync(dirname(at(lockStamp)), { recursive: true });
-  writeFileSync(at(lockStamp), lock);
+  if (run('npm', ['ci', '--no-audit', '--no-fund'])) return;
+  giveUp(
+    'The packages could not be installed.',
+    'The lines above say why. Compiling the database driver wants python3, make and a C++ compiler.',
+  );
 }
