@@ -2,14 +2,18 @@ import { energisedSections } from '@lampwright/harness';
 import { lowerBoundSeconds } from './bounds';
 import type { Cells } from './cells';
 import { pointsOf, powerUpSeconds } from './costs';
-import type { Finding } from './lookAhead';
+import type { Finding } from './finding';
 import type { Advice, Question } from './types';
 
 /** Rounding allowed between a plan and the bound that proves it, in seconds. */
 const PROVEN_WITHIN = 1e-6;
 
 /** Says a finding in the terms of the question: points instead of cells, and every second counted. O(sections). */
-export function adviceOf(question: Question, cells: Cells, { step, length }: Finding): Advice {
+export function adviceOf(
+  question: Question,
+  cells: Cells,
+  { step, length, optimal }: Finding,
+): Advice {
   const { tree, timing, elsewhere } = question;
   const before = new Set(question.open);
   const wanted = new Set(step.open.map((cell) => cells.points[cell]?.partId));
@@ -23,7 +27,7 @@ export function adviceOf(question: Question, cells: Cells, { step, length }: Fin
   const closed = new Set(toClose);
   const open = [...question.open.filter((id) => !closed.has(id)), ...toOpen];
   const expectedSeconds = cells.closing + length.weighted;
-  const bound = Math.min(lowerBoundSeconds(cells), expectedSeconds);
+  const bound = optimal ? expectedSeconds : Math.min(lowerBoundSeconds(cells), expectedSeconds);
   return {
     open,
     toOpen,

@@ -1,18 +1,20 @@
+import { exactFinding } from './exact/exactFinding';
+import type { Finding } from './finding';
 import { greedy } from './greedy';
-import { playOut, type Length } from './playOut';
-import { Search, StepsSpent, type Breadth } from './search';
-import type { Situation, Step, Workbench } from './situation';
-
-/** The best step found, how long its play is, and how far that is vouched for. */
-export interface Finding {
-  step: Step;
-  length: Length;
-}
+import { easiestFirst, halfByCount } from './habits';
+import { playOut, type Policy } from './playOut';
+import { Search, type Allows, type Breadth } from './search';
+import type { Situation, Workbench } from './situation';
+import { Steps, within } from './steps';
 
 /** Above this many cells even one round of playing out every choice takes too long. */
 const MOST_CELLS_TO_SEARCH = 400;
 
+/** What stands behind a choice while it is ranked. */
 const policies = [greedy(1), greedy(3)];
+
+/** Plays that the advice is never worse than, from the first step on. */
+const baselines = [greedy(1), greedy(3), easiestFirst, halfByCount];
 
 const breadths: Breadth[] = [
   { mostNew: 2, width: () => 1 },
@@ -21,37 +23,65 @@ const breadths: Breadth[] = [
   { mostNew: 2, width: (count) => (count > 20 ? 2 : count > 8 ? 3 : 8) },
 ];
 
-/** Searches ever more broadly until the steps are spent, and keeps the last search that came to its end. */
-export function lookAhead(bench: Workbench, situation: Situation, steps: number): Finding {
-  let found = greedyFinding(bench, situation);
+/** Seconds by which two sums of the same play may differ. */
+const ROUNDING = 1e-6;
+
+/**
+ * The best step found: proven best by the exact search where that comes to its end within `steps`, otherwise the best
+ * of ever broader searches. The same question gives the same finding.
+ */
+export function lookAhead(
+  bench: Workbench,
+  situation: Situation,
+  steps: number,
+  allows: Allows,
+): Finding | null {
+  let found: Finding | null = null;
+  const offer = (next: Finding | null) => {
+    if (next && (!found || next.length.weighted < found.length.weighted)) found = next;
+  };
+  const known = () => found?.length.weighted ?? Infinity;
+  for (const policy of baselines) offer(playedBy(bench, situation, policy, allows));
   if (situation.cells.length > MOST_CELLS_TO_SEARCH) return found;
+  offer(searched(bench, situation, { mostNew: 2, width: () => 1 }, steps, allows));
+  const exact = exactFinding(bench, situation, known() + ROUNDING, 4 * steps, allows);
+  if (exact) return exact;
   for (const breadth of breadths) {
-    const wider = searched(new Search(bench, policies, breadth, steps), situation);
+    const wider = searched(bench, situation, breadth, steps, allows);
     if (!wider) break;
-    if (wider.length.weighted <= found.length.weighted) found = wider;
+    offer(wider);
   }
   return found;
 }
 
 /** Several steps worth comparing, best first, each with the length of the play behind it. */
 export function candidates(bench: Workbench, situation: Situation, most: number): Finding[] {
-  const breadth = { mostNew: 2, width: () => 1 };
-  return new Search(bench, policies, breadth, Infinity).candidates(situation, most);
+  const search = new Search(bench, policies, { mostNew: 2, width: () => 1 }, new Steps(Infinity));
+  return search
+    .candidates(situation, most, () => true)
+    .map((played) => ({ ...played, optimal: false }));
 }
 
-function greedyFinding(bench: Workbench, situation: Situation): Finding {
-  const policy = greedy(1);
-  return {
-    step: policy(bench, situation),
-    length: playOut(bench, situation, policy),
-  };
+function playedBy(
+  bench: Workbench,
+  situation: Situation,
+  policy: Policy,
+  allows: Allows,
+): Finding | null {
+  const step = policy(bench, situation);
+  if (!allows(step)) return null;
+  return { step, length: playOut(bench, situation, policy), optimal: false };
 }
 
-function searched(search: Search, situation: Situation): Finding | null {
-  try {
-    return search.best(situation);
-  } catch (error) {
-    if (error instanceof StepsSpent) return null;
-    throw error;
-  }
+function searched(
+  bench: Workbench,
+  situation: Situation,
+  breadth: Breadth,
+  steps: number,
+  allows: Allows,
+): Finding | null {
+  return within(steps, (left) => {
+    const best = new Search(bench, policies, breadth, left).best(situation, allows);
+    return best && { ...best, optimal: false };
+  });
 }

@@ -3,11 +3,12 @@ import { cellsOf } from './cells';
 import { closingSeconds } from './costs';
 import { lookAhead } from './lookAhead';
 import { openingSituation, Workbench } from './situation';
+import { tellsMore } from './tellsMore';
 import type { Plan, Planner, Question } from './types';
 
 /** How much the planner may think. Steps are power-ups tried in thought, so that answers do not depend on a clock. */
 export interface PlannerOptions {
-  /** At most about so many steps for one question. Default 4000, some tens of milliseconds at 60 sections. */
+  /** At most about so many steps for one question. Default 5000, some tens of milliseconds at 60 sections. */
   steps?: number;
 }
 
@@ -17,7 +18,7 @@ export interface PlannerOptions {
  * @throws RangeError from `plan` when no probability is above 0: ask `Belief.contradicted` first.
  */
 export function createPlanner(options: PlannerOptions = {}): Planner {
-  return { plan: (question) => planWith(question, options.steps ?? 4000) };
+  return { plan: (question) => planWith(question, options.steps ?? 5000) };
 }
 
 const planner = createPlanner();
@@ -40,5 +41,9 @@ function planWith(question: Question, steps: number): Plan {
     };
   }
   const bench = new Workbench(cells);
-  return { kind: 'powerUp', advice: adviceOf(question, cells, lookAhead(bench, situation, steps)) };
+  const found =
+    lookAhead(bench, situation, steps, tellsMore(question, cells)) ??
+    lookAhead(bench, situation, steps, () => true);
+  if (!found) throw new Error('sections in question that no point parts');
+  return { kind: 'powerUp', advice: adviceOf(question, cells, found) };
 }

@@ -1,6 +1,7 @@
 import { choicesOf } from './choices';
 import type { Length, Policy } from './playOut';
 import { finalWalk, type Situation, type Step, type Workbench } from './situation';
+import type { Steps } from './steps';
 
 /** How widely a search looks. */
 export interface Breadth {
@@ -10,8 +11,14 @@ export interface Breadth {
   width: (count: number) => number;
 }
 
-/** Thrown inside a search that has used up its steps, and caught by whoever set the limit. */
-export class StepsSpent extends Error {}
+/** A step and how long the best play found behind it is. */
+export interface Played {
+  step: Step;
+  length: Length;
+}
+
+/** Whether a step may be proposed. */
+export type Allows = (step: Step) => boolean;
 
 /**
  * Looks into the best few choices of every situation that the best few choices lead to, and remembers each. Choices are
@@ -21,32 +28,29 @@ export class StepsSpent extends Error {}
 export class Search {
   private readonly values = new Map<string, Length>();
   private readonly basic: Map<string, Length>[];
-  private left: number;
 
   constructor(
     private readonly bench: Workbench,
     private readonly policies: readonly Policy[],
     private readonly breadth: Breadth,
-    steps: number,
+    private readonly steps: Steps,
   ) {
-    this.left = steps;
     this.basic = policies.map(() => new Map());
   }
 
-  /** The best step found, and how long its play is to the end, closing included. */
-  best(situation: Situation): { step: Step; length: Length } {
-    let best: { step: Step; length: Length } | undefined;
-    for (const step of this.ranked(situation, this.breadth.width(situation.count))) {
+  /** The best step found among the allowed ones, its play counted to the end, closing included. */
+  best(situation: Situation, allows: Allows = () => true): Played | null {
+    let best: Played | null = null;
+    for (const step of this.ranked(situation, this.breadth.width(situation.count), allows)) {
       const length = this.after(situation, step, (next) => this.value(next));
       if (!best || length.weighted < best.length.weighted) best = { step, length };
     }
-    if (!best) throw new Error('two cells in question that no point parts');
     return best;
   }
 
   /** The most promising steps, each with the length of the best play found behind it; at most `most`, best first. */
-  candidates(situation: Situation, most: number): { step: Step; length: Length }[] {
-    return this.ranked(situation, most)
+  candidates(situation: Situation, most: number, allows: Allows): Played[] {
+    return this.ranked(situation, most, allows)
       .map((step) => ({
         step,
         length: this.after(situation, step, (next) => this.value(next)),
@@ -59,16 +63,18 @@ export class Search {
     const key = keyOf(situation);
     const known = this.values.get(key);
     if (known) return known;
-    const { length } = this.best(situation);
+    const length = this.best(situation)?.length ?? this.end(situation);
     this.values.set(key, length);
     return length;
   }
 
-  private ranked(situation: Situation, most: number): Step[] {
-    const steps = this.stepsOf(situation).map((step) => ({
-      step,
-      length: this.after(situation, step, (next) => this.basicLength(next)),
-    }));
+  private ranked(situation: Situation, most: number, allows: Allows): Step[] {
+    const steps = this.stepsOf(situation)
+      .filter(allows)
+      .map((step) => ({
+        step,
+        length: this.after(situation, step, (next) => this.basicLength(next)),
+      }));
     steps.sort((a, b) => a.length.weighted - b.length.weighted);
     return steps.slice(0, most).map(({ step }) => step);
   }
@@ -86,8 +92,7 @@ export class Search {
       const tidy = situation.spent > 0 && !step.tidies && this.bench.step(situation, open, true);
       if (tidy) steps.push(tidy);
     }
-    this.left -= steps.length;
-    if (this.left < 0) throw new StepsSpent();
+    this.steps.spend(steps.length);
     return steps;
   }
 
@@ -125,7 +130,7 @@ export class Search {
     const key = keyOf(situation);
     const before = known.get(key);
     if (before) return before;
-    this.left -= 1;
+    this.steps.spend(1);
     const step = policy(this.bench, situation);
     const length = this.after(situation, step, (next) => this.played(next, policy, known));
     known.set(key, length);

@@ -1,0 +1,72 @@
+import type { Cells } from '../cells';
+
+/** More cells than this do not fit the numbers that stand for sets of cells and for states of the search. */
+export const MOST_MASKED_CELLS = 20;
+
+/**
+ * The cells of a question as sets of bits: bit `v` stands for cell `v`, and in a set of points for the point above it.
+ * Walks are counted in ranks, 0 for no walk, so that a state of the search is one number.
+ */
+export interface Masks {
+  cells: Cells;
+  /** All cells that may hold the short. */
+  everything: number;
+  /** By cell: the cells fed through it, itself included. */
+  beyond: Int32Array;
+  /**
+   * By leaf: its sister leaves that hold more probability for each second of handling, the first of equal ones. As long
+   * as readings are free and their parent is in question, each of them goes before it (see `SetBook.opening`).
+   */
+  sistersBefore: Int32Array;
+  /** By point: the rank of its walk. */
+  walkRank: Int32Array;
+  /** By rank: the seconds of the walk, ascending. */
+  walkSeconds: number[];
+}
+
+/** O(cells^2). */
+export function masksOf(cells: Cells): Masks {
+  const { size, parent, weight, walk, blockingWalk, spentWalk } = cells;
+  const beyond = new Int32Array(size);
+  let everything = 0;
+  for (let v = size - 1; v >= 0; v -= 1) {
+    const self = (weight[v] ?? 0) > 0 ? 1 << v : 0;
+    everything |= self;
+    beyond[v] = (beyond[v] ?? 0) | self;
+    if (v > 0) {
+      const up = parent[v] ?? 0;
+      beyond[up] = (beyond[up] ?? 0) | (beyond[v] ?? 0);
+    }
+  }
+  const walkSeconds = [...new Set([0, blockingWalk, spentWalk, ...walk])].sort((a, b) => a - b);
+  return {
+    cells,
+    everything,
+    beyond,
+    sistersBefore: sistersBefore(cells),
+    walkRank: Int32Array.from(walk, (seconds) => walkSeconds.indexOf(seconds)),
+    walkSeconds,
+  };
+}
+
+/** The bits of a set, ascending. */
+export function bitsOf(mask: number): number[] {
+  const bits: number[] = [];
+  for (let rest = mask; rest !== 0; rest &= rest - 1) bits.push(31 - Math.clz32(rest & -rest));
+  return bits;
+}
+
+function sistersBefore({ size, parent, weight, hands }: Cells): Int32Array {
+  const isLeaf = new Uint8Array(size).fill(1);
+  for (let v = 1; v < size; v += 1) isLeaf[parent[v] ?? 0] = 0;
+  const before = new Int32Array(size);
+  for (let v = 1; v < size; v += 1) {
+    for (let other = 1; other < size; other += 1) {
+      if (other === v || !isLeaf[v] || !isLeaf[other] || parent[v] !== parent[other]) continue;
+      const own = (weight[v] ?? 0) * (hands[other] ?? 0);
+      const its = (weight[other] ?? 0) * (hands[v] ?? 0);
+      if (its > own || (its === own && other < v)) before[v] = (before[v] ?? 0) | (1 << other);
+    }
+  }
+  return before;
+}
