@@ -1,11 +1,10 @@
 import type { TraceEvent } from './events';
-import type { EventOf } from './eventOf';
 import { isTraceEventType } from './eventTypes';
 import { refusalFor } from './refusalFor';
 import { refuse } from './rules/rule';
 import { sameJson } from './sameJson';
 import type { Refusal } from './state';
-import { foldTrace, step, type TraceLog } from './traceLog';
+import { foldTrace, refusalToStand, step, type TraceLog } from './traceLog';
 
 export type AppendOutcome =
   { ok: true; log: TraceLog; duplicate?: boolean } | { ok: false; refusal: Refusal };
@@ -37,23 +36,18 @@ export function appendEvent(log: TraceLog, event: TraceEvent): AppendOutcome {
 }
 
 function refusalToAdd(log: TraceLog, event: TraceEvent): Refusal | null {
-  if (!isTraceEventType(event.type)) return refuse('malformed', [String(event.type)]);
-  if (log.snapshot.status !== 'active') return refuse('fixed', [log.record.id]);
+  const { snapshot, effective } = log;
+  if (!isTraceEventType(event.type) || snapshot.status !== 'active') {
+    return refusalFor(snapshot, event);
+  }
   const expected = nextSeq(log, event.device);
   if (event.seq !== expected) return refuse('outOfSequence', [event.device, String(expected)]);
-  return event.type === 'event.undone' ? ruleForUndo(log, event) : refusalFor(log.snapshot, event);
+  return refusalToStand(snapshot, effective, event);
 }
 
 /** The number that a device gives its next event of this trace. */
 export function nextSeq(log: TraceLog, device: string): number {
   return (log.record.events.findLast((event) => event.device === device)?.seq ?? 0) + 1;
-}
-
-/** Only the newest event that still stands can be taken back, one at a time. */
-function ruleForUndo(log: TraceLog, event: EventOf<'event.undone'>): Refusal | null {
-  const newest = log.effective.at(-1);
-  if (!newest) return refuse('nothingToUndo', [event.target]);
-  return newest.id === event.target ? null : refuse('notTheLastEvent', [newest.id]);
 }
 
 /** Whether there is an event to take back. */

@@ -1,8 +1,8 @@
 import { initialTransition, transition } from 'xstate';
-import { effectiveEvents } from './effectiveEvents';
 import type { TraceEvent } from './events';
 import type { TraceRecord } from './record';
 import { refusalFor } from './refusalFor';
+import { ruleForUndo } from './ruleForUndo';
 import type { Refusal } from './state';
 import { traceMachine, type TraceSnapshot } from './traceMachine';
 
@@ -26,18 +26,33 @@ export interface SkippedEvent {
 export function foldTrace(record: TraceRecord): TraceLog {
   const { events, ...surroundings } = record;
   let [snapshot] = initialTransition(traceMachine, surroundings);
+  const before: TraceSnapshot[] = [];
   const effective: TraceEvent[] = [];
   const skipped: SkippedEvent[] = [];
-  for (const event of effectiveEvents(events)) {
-    const refusal = refusalFor(snapshot, event);
+  for (const event of events) {
+    const refusal = refusalToStand(snapshot, effective, event);
     if (refusal) {
       skipped.push({ id: event.id, refusal });
+    } else if (event.type === 'event.undone') {
+      effective.pop();
+      snapshot = before.pop() ?? snapshot;
     } else {
-      snapshot = step(snapshot, event);
       effective.push(event);
+      before.push(snapshot);
+      snapshot = step(snapshot, event);
     }
   }
   return { record, snapshot, effective, skipped };
+}
+
+/** Why an event cannot stand after those that do, its number in the device's order aside. */
+export function refusalToStand(
+  snapshot: TraceSnapshot,
+  effective: readonly TraceEvent[],
+  event: TraceEvent,
+): Refusal | null {
+  const isUndo = event.type === 'event.undone' && snapshot.status === 'active';
+  return isUndo ? ruleForUndo(effective, event) : refusalFor(snapshot, event);
 }
 
 /** Opens a trace for appending, from its record with the events that it has so far. */

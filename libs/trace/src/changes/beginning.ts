@@ -3,6 +3,7 @@ import { isOverload, tripsAfter } from '../feeds';
 import { own } from '../own';
 import type { TraceContext } from '../state';
 import type { Change } from './change';
+import { onCircuit } from './onCircuit';
 
 export const state: Change<'intake.stated'> = (context, event) => ({
   ...context,
@@ -29,14 +30,10 @@ export const wiggle: Change<'wiggle.read'> = (context, { circuit, outcome }) => 
 });
 
 /** Narrowing begins on the first circuit that showed the fault with everything connected. */
-export function beginNarrowing(context: TraceContext): TraceContext {
-  return beginOn(context, suspectedCircuits(context)[0] ?? null);
-}
-
-function beginOn(context: TraceContext, circuit: string | null): TraceContext {
-  const flickered = circuit !== null && own(context.confirmed, circuit)?.outcome === 'flickers';
-  return { ...context, circuit, comesAndGoes: context.comesAndGoes || flickered };
-}
+export const beginNarrowing: Change<'confirm.finished'> = (context) => {
+  const [circuit] = suspectedCircuits(context);
+  return circuit === undefined ? context : onCircuit(context, circuit);
+};
 
 /** What shows only while the harness is moved comes and goes. */
 export const beginAfterWiggle: Change<'wiggle.read'> = (context, event) => ({

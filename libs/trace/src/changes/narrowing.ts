@@ -1,17 +1,13 @@
-import { own } from '../own';
 import { isAllConnected } from '../powerUps';
 import { situation } from '../situation';
 import type { ContradictionKind, PowerUp, TraceContext } from '../state';
 import { tripsAfter } from '../feeds';
 import type { EventOf } from '../eventOf';
 import type { Change } from './change';
+import { onCircuit } from './onCircuit';
 
-export const chooseCircuit: Change<'circuit.chosen'> = (context, { circuit }) => ({
-  ...context,
-  circuit,
-  chosen: null,
-  comesAndGoes: context.comesAndGoes || own(context.confirmed, circuit)?.outcome === 'flickers',
-});
+export const chooseCircuit: Change<'circuit.chosen'> = (context, { circuit }) =>
+  onCircuit(context, circuit);
 
 export const barPoint: Change<'point.barred'> = (context, { point, reason }) => ({
   ...context,

@@ -39,6 +39,19 @@ describe('a played trace', () => {
       const log = foldTrace({ ...record, events });
       expect(stepOf(log)).toBe('signed');
       expect(log.skipped).toEqual([]);
+      // The planner never asks for a power-up that would be refused; looking early would be the way out.
+      expect(events.map(({ type }) => type)).not.toContain('inspection.started');
+    },
+  );
+
+  it.each(Array.from({ length: 20 }, (_, seed) => seed))(
+    'comes to its end with two shorts that show eight times in ten, seed %i',
+    (seed) => {
+      const record = newRecord();
+      const hidden = [places[seed % places.length]!, places[(seed + 5) % places.length]!];
+      const events = truthfulTester(record, hidden, { detection: 0.8, seed, choose });
+      expect(stepOf(foldTrace({ ...record, events }))).toBe('signed');
+      expect(events.map(({ type }) => type)).not.toContain('inspection.started');
     },
   );
 
