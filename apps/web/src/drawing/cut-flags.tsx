@@ -22,8 +22,7 @@ export function CutFlags({ flags, fontSize }: Props) {
         x={box.x + box.width / 2}
         y={box.y + box.height / 2 + fontSize * 0.34}
         textAnchor="middle"
-        fontSize={fontSize}
-        fontWeight={700}
+        style={{ fontSize, fontWeight: 700 }}
         fill={colours.onFlag}
       >
         {text}

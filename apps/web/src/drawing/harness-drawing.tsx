@@ -10,7 +10,7 @@ import { FoundWires } from './found-wires';
 import type { Point } from './layout/geometry';
 import { layoutHarness } from './layout/layout-harness';
 import { placeFlags } from './layout/place-flags';
-import { shortName } from './layout/label-lines';
+import { shortLabel, shortName } from './layout/label-lines';
 import { LengthDimension } from './length-dimension';
 import type { HarnessDrawingProps } from './marks';
 import { OtherParts } from './other-parts';
@@ -38,13 +38,13 @@ export function HarnessDrawing(props: HarnessDrawingProps) {
   const { transform, settled, ...zoom } = useZoom(ref, sheet);
   const { describe } = usePartWords(marks);
 
-  const kept = [...marks.cut, ...marks.open, ...(pickable ?? [])].sort().join('\n');
+  const kept = JSON.stringify([...marks.cut, ...marks.open, ...(pickable ?? [])].sort());
   const layout = useMemo(
     () =>
       layoutHarness({
         harness,
         circuit,
-        keep: new Set(kept.split('\n')),
+        keep: new Set(JSON.parse(kept) as string[]),
         ...(trailer ? { trailer } : {}),
         sheet,
         compact,
@@ -56,7 +56,7 @@ export function HarnessDrawing(props: HarnessDrawingProps) {
     [layout, marks.open],
   );
   const ink = 1 / Math.sqrt(settled);
-  const fontSize = Math.min(15, Math.max(12, sheet.width / 48));
+  const fontSize = compact ? 11 : Math.min(15, Math.max(12, sheet.width / 48));
 
   const screen = new Map(
     [...layout.positions].map(([id, at]): [string, Point] => [
@@ -81,12 +81,12 @@ export function HarnessDrawing(props: HarnessDrawingProps) {
     below: roomy,
     wording: ({ label }, alone) => {
       const code = shortName(label) ?? label;
-      return [t(alone ? 'partHere' : 'partToo', { label: code }), code];
+      return [t(alone ? 'partHere' : 'partToo', { label: code }), code, shortLabel(code)];
     },
   });
-  const row = { height: roomy ? 34 : 28, left: 6, right: sheet.width - 6 };
+  const row = { height: roomy ? 34 : compact ? 22 : 28, left: 6, right: sheet.width - 6 };
   const flags = [
-    ...placeFlags(cuts, 'top', { ...row, y: 6 }, fontSize + 2),
+    ...placeFlags(cuts, 'top', { ...row, y: compact ? 2 : 6 }, fontSize + 2),
     ...placeFlags(cuts, 'bottom', { ...row, y: sheet.height - row.height - 24 }, fontSize + 2),
   ];
   const flagBelow = flags.some((flag) => flag.edge === 'bottom');

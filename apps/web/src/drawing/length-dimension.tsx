@@ -40,7 +40,7 @@ export function LengthDimension({ deck, y, lengthMetres, unit, fontSize }: Props
         x={deck.x + deck.width / 2}
         y={y + fontSize * 0.34}
         textAnchor="middle"
-        fontSize={fontSize}
+        style={{ fontSize }}
         fill={colours.muted}
         stroke={colours.paper}
         strokeWidth={fontSize * 0.9}

@@ -17,7 +17,7 @@ interface Props {
 export function PartLabels({ labels, parts, positions, places, size }: Props) {
   const partById = new Map(parts.map((part) => [part.id, part]));
   return (
-    <g fontSize={size} aria-hidden>
+    <g style={{ fontSize: size }} aria-hidden>
       {labels.map((label) => {
         const part = partById.get(label.id);
         const at = positions.get(label.id);
@@ -57,7 +57,7 @@ export function PartLabels({ labels, parts, positions, places, size }: Props) {
               strokeWidth={size * 0.26}
               strokeLinejoin="round"
               paintOrder="stroke"
-              fontWeight={label.bold ? 700 : mark === 'inQuestion' ? 600 : 400}
+              style={{ fontWeight: label.bold ? 700 : mark === 'inQuestion' ? 600 : 400 }}
               textAnchor="middle"
             >
               {label.lines.map((line, index) => (

@@ -21,7 +21,7 @@ export function ScaleRow({ sheet, alongScale, acrossScale, unit, fontSize }: Pro
   const y = sheet.height - fontSize * 0.9;
   const part = bar.pixels / bar.parts;
   return (
-    <g aria-hidden transform={`translate(12 ${y})`} fontSize={fontSize} fill={colours.muted}>
+    <g aria-hidden transform={`translate(12 ${y})`} style={{ fontSize }} fill={colours.muted}>
       <rect
         x={-6}
         y={-fontSize}

@@ -5,7 +5,7 @@ import type { SheetText } from './sheet-texts';
 export function SheetTexts({ texts, size }: { texts: readonly SheetText[]; size: number }) {
   const { t } = useTranslation('drawing');
   return (
-    <g aria-hidden fontSize={size} fill={colours.muted} letterSpacing={0.2}>
+    <g aria-hidden style={{ fontSize: size }} fill={colours.muted}>
       {texts.map(({ key, at, turn, anchor }) => (
         <text
           key={key}

@@ -15,7 +15,7 @@ type Words = Record<SheetText['key'], string>;
 /** Places along an end where its name may stand, as shares of the deck's width. */
 const ALONG_THE_END = [0.5, 0.3, 0.7, 0.2, 0.8];
 
-/** The texts of the sheet itself: which end and which side is which. They keep clear of `taken`. */
+/** The texts of the sheet itself: which end and which side is which. One that finds no free place is left out. */
 export function sheetTexts(
   frame: Frame,
   size: number,
@@ -42,9 +42,9 @@ export function sheetTexts(
       };
     };
     const shifts = [0, 30, 60, 90, 120, 160, 200].map(at);
-    return shifts.find(({ box }) => free(box)) ?? at(0);
+    return shifts.find(({ box }) => free(box));
   };
-  const upright = (key: SheetText['key'], x: number): SheetText => {
+  const upright = (key: SheetText['key'], x: number): SheetText | undefined => {
     const length = textWidth(words[key], size);
     const at = (share: number): SheetText => {
       const y = deck.y + deck.height * share;
@@ -56,12 +56,12 @@ export function sheetTexts(
         box: { x: x - size * 0.6, y: y - length / 2, width: size * 1.2, height: length },
       };
     };
-    return ALONG_THE_END.map(at).find(({ box }) => free(box)) ?? at(0.5);
+    return ALONG_THE_END.map(at).find(({ box }) => free(box));
   };
   return [
     level('curbSide', deck.x, above, 'start'),
     level('roadSide', deck.x, below, 'start'),
     front ? level('frontFace', left, below, 'start') : upright('front', left - size * 0.9),
     rear ? level('rearFace', right, below, 'end') : upright('rear', right + size * 0.9),
-  ];
+  ].filter((text) => text !== undefined);
 }

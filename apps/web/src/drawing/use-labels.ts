@@ -44,6 +44,7 @@ export function useLabels(input: Input): { texts: SheetText[]; placed: PlacedLab
         ...symbolBoxes(layout, 1),
         ...wireBoxes(layout, layout.symbol / 2),
         ...cutBoxes(layout, marks, 1),
+        ...flags.map((flag) => flag.box),
       ],
     );
     const requests = labelRequests({

@@ -6,12 +6,14 @@ export function shortName(label: string): string | null {
   return /^[\p{Lu}]{1,3}-?\d{1,3}[a-z]?(?=\s|$)/u.exec(label)?.[0] ?? null;
 }
 
-/**
- * The ways a label may be written, best first: without the clause after its last comma, which in practice names the
- * side that the drawing shows anyway; on two lines; by its code, or by its number in the list.
- */
+/** A label without the clause after its last comma, which in practice names the side that the drawing shows anyway. */
+export function shortLabel(label: string): string {
+  return label.replace(/,[^,]*$/, '');
+}
+
+/** The ways a label may be written, best first: short; on two lines; by its code, or by its number in the list. */
 export function labelVariants(label: string, number: number): string[][] {
-  const short = label.replace(/,[^,]*$/, '');
+  const short = shortLabel(label);
   const code = shortName(label);
   const variants = [[short]];
   const halves = short.length > LONG ? twoLines(short) : null;

@@ -83,8 +83,7 @@ function has(zones: ReadonlyMap<PartId, Zone>, zone: Zone): boolean {
 /** Room above for the flags of the cut, below for the scale, and around for labels. */
 function marginsOf(sheet: Size, compact: boolean): Margins {
   const side = compact ? 8 : clamp(sheet.width * 0.035, 21, 30);
-  if (compact)
-    return { top: sheet.height * 0.16, right: side, bottom: sheet.height * 0.08, left: side };
+  if (compact) return { top: 32, right: side, bottom: 10, left: side };
   const top = clamp(sheet.height * 0.16, 40, 84);
   return { top, right: side, bottom: clamp(sheet.height * 0.18, 40, 92), left: side };
 }
