@@ -15,7 +15,8 @@ import { useWebFiles } from './common/web-files';
 export async function createApp(settings: Settings): Promise<NestExpressApplication> {
   const app = await NestFactory.create<NestExpressApplication>(AppModule.forRoot(settings), {
     bodyParser: false,
-    bufferLogs: true,
+    // Silent until the logger is there; a failed start is explained by whoever called.
+    logger: false,
     abortOnError: false,
   });
   app.useLogger(app.get(Logger));

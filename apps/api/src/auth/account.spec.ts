@@ -1,4 +1,4 @@
-import { startTestServer, TECHNICIAN, type TestServer } from '../../test/test-server';
+import { startTestServer, TECHNICIAN, type TestServer } from '../testing/test-server';
 
 let server: TestServer;
 beforeEach(async () => {

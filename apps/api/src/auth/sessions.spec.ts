@@ -5,7 +5,7 @@ import {
   startTestServer,
   TECHNICIAN,
   type TestServer,
-} from '../../test/test-server';
+} from '../testing/test-server';
 
 let server: TestServer;
 beforeEach(async () => {

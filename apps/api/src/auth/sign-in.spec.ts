@@ -6,7 +6,7 @@ import {
   startTestServer,
   TECHNICIAN,
   type TestServer,
-} from '../../test/test-server';
+} from '../testing/test-server';
 import { DEMO_PASSWORD } from '../demo/demo-password';
 import { Person } from '../people/person.entity';
 

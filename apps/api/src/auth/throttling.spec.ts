@@ -1,4 +1,4 @@
-import { OTHER_TECHNICIAN, startTestServer, TECHNICIAN } from '../../test/test-server';
+import { OTHER_TECHNICIAN, startTestServer, TECHNICIAN } from '../testing/test-server';
 
 it('answers guessing with 429 and how long to wait, even for the right password', async () => {
   const server = await startTestServer();

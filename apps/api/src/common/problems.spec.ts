@@ -7,7 +7,7 @@ import {
   TECHNICIAN,
   type Agent,
   type TestServer,
-} from '../../test/test-server';
+} from '../testing/test-server';
 
 let server: TestServer;
 let lead: Agent;

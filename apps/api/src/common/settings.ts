@@ -1,4 +1,5 @@
 import { resolve } from 'node:path';
+import { StartError } from './start-error';
 
 /** What the environment decides; read once, at start. */
 export interface Settings {
@@ -65,7 +66,7 @@ function wholeNumber(env: NodeJS.ProcessEnv, name: string, fallback: number, max
   if (value === undefined || value === '') return fallback;
   const number = Number(value);
   if (!Number.isInteger(number) || number < 0 || number > max) {
-    throw new Error(`${name} is "${value}"; it must be a whole number from 0 to ${max}.`);
+    throw new StartError(`${name} is "${value}"; it must be a whole number from 0 to ${max}.`);
   }
   return number;
 }

@@ -1,7 +1,7 @@
 import { mkdirSync, mkdtempSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
-import { startTestServer, type TestServer } from '../../test/test-server';
+import { startTestServer, type TestServer } from '../testing/test-server';
 
 const webDir = mkdtempSync(join(tmpdir(), 'lampwright-web-'));
 let server: TestServer;

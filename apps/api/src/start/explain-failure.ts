@@ -1,4 +1,4 @@
-import { StartError } from './preconditions';
+import { StartError } from '../common/start-error';
 
 /** Codes of failures that a person can do something about, and what. */
 const ADVICE: Record<string, (error: NodeJS.ErrnoException & { port?: number }) => string> = {

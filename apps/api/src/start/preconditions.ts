@@ -1,9 +1,8 @@
 import { accessSync, constants, mkdirSync } from 'node:fs';
 
-const MINIMUM_NODE = [20, 19] as const;
+import { StartError } from '../common/start-error';
 
-/** A start-up failure that a person can do something about; its message says what. */
-export class StartError extends Error {}
+const MINIMUM_NODE = [20, 19] as const;
 
 /** @throws StartError when Node is too old. */
 export function assertNodeVersion(version: string): void {

@@ -6,7 +6,7 @@ import {
   trailerId,
   type Agent,
   type TestServer,
-} from '../../test/test-server';
+} from '../testing/test-server';
 
 let server: TestServer;
 let technician: Agent;

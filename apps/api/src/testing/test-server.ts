@@ -4,9 +4,9 @@ import { join } from 'node:path';
 import type { NestExpressApplication } from '@nestjs/platform-express';
 import { demoYard } from '@lampwright/demo';
 import request from 'supertest';
-import { readSettings, type Settings } from '../src/common/settings';
-import { createApp } from '../src/create-app';
-import { DEMO_PASSWORD } from '../src/demo/demo-password';
+import { readSettings, type Settings } from '../common/settings';
+import { createApp } from '../create-app';
+import { DEMO_PASSWORD } from '../demo/demo-password';
 
 /** The people of the demo yard that tests sign in as. */
 export const LEAD = 'maren@thornwick-yard.example';
