@@ -29,6 +29,7 @@ export default defineConfig({
     environment: 'jsdom',
     globals: true,
     include: ['src/**/*.test.{ts,tsx}'],
+    testTimeout: 60_000,
     setupFiles: ['src/testing/setup.ts'],
   },
 });

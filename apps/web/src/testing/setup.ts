@@ -1,6 +1,10 @@
 import '@testing-library/jest-dom/vitest';
 import '../i18n/i18n';
+import { configure } from '@testing-library/react';
 import { fakeIndexedDb } from './fake-indexed-db';
+
+// Screens are fetched when they are first opened, which a busy machine takes its time over.
+configure({ asyncUtilTimeout: 15_000 });
 
 // jsdom has none of these, and the dialog and the theme read them.
 window.matchMedia ??= ((media: string) => ({
