@@ -1,5 +1,6 @@
 import { Check, Zap } from 'lucide-react';
-import { Answer } from '../../../ui/answer';
+import { Answer } from '../../../ui';
+import type { ButtonProps } from '../../../ui/button';
 import { useGuardedTap } from './tap-guard';
 
 export type AnswerTone = 'overload' | 'holds' | 'plain';
@@ -10,6 +11,8 @@ interface AnswerButtonProps {
   /** What the answer would mean. */
   about?: string;
   disabled?: boolean;
+  /** In place of the sign of the tone. */
+  icon?: ButtonProps['icon'];
   onTap: () => void;
 }
 
@@ -20,10 +23,23 @@ const looks = {
 } as const;
 
 /** One answer to the question on the screen: colour, sign and words each say it alone. */
-export function AnswerButton({ tone, label, about, disabled = false, onTap }: AnswerButtonProps) {
+export function AnswerButton({
+  tone,
+  label,
+  about,
+  disabled = false,
+  icon,
+  onTap,
+}: AnswerButtonProps) {
   const tap = useGuardedTap(onTap);
   return (
-    <Answer {...looks[tone]} hint={about} disabled={disabled} onClick={tap}>
+    <Answer
+      {...looks[tone]}
+      {...(icon ? { icon } : {})}
+      hint={about}
+      disabled={disabled}
+      onClick={tap}
+    >
       {label}
     </Answer>
   );

@@ -8,6 +8,8 @@ interface ChoiceCardProps {
   /** A word that sets this choice apart, as "Recommended". */
   badge?: string;
   chosen: boolean;
+  /** One of several that exclude each other: a round mark in place of the box. */
+  single?: boolean;
   onTap: () => void;
 }
 
@@ -48,6 +50,7 @@ const Box = chakra('span', {
     bg: 'bg.panel',
   },
   variants: {
+    single: { true: { borderRadius: 'full' } },
     chosen: { true: { bg: 'ink.solid', borderColor: 'ink.solid', color: 'ink.onSolid' } },
   },
 });
@@ -76,11 +79,20 @@ const Badge = chakra('span', {
 });
 
 /** Something to choose, alone or with others: a box with a tick, a heavier edge and a wash say that it is chosen. */
-export function ChoiceCard({ label, about, badge, chosen, onTap }: ChoiceCardProps) {
+export function ChoiceCard({
+  label,
+  about,
+  badge,
+  chosen,
+  single = false,
+  onTap,
+}: ChoiceCardProps) {
   const tap = useGuardedTap(onTap);
   return (
     <Card type="button" aria-pressed={chosen} onClick={tap}>
-      <Box chosen={chosen}>{chosen && <Check aria-hidden size={22} strokeWidth={3.5} />}</Box>
+      <Box chosen={chosen} single={single}>
+        {chosen && <Check aria-hidden size={22} strokeWidth={3.5} />}
+      </Box>
       <span>
         {label}
         {badge && <Badge>{badge}</Badge>}

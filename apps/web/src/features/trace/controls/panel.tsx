@@ -61,6 +61,11 @@ export const Stack = chakra('div', {
   base: { display: 'flex', flexDirection: 'column', gap: 'touch' },
 });
 
+/** Choices of equal width, two on a line. */
+export const Pairs = chakra('div', {
+  base: { display: 'grid', gridTemplateColumns: '1fr 1fr', gap: 'touch' },
+});
+
 export const Row = chakra('div', {
   base: { display: 'flex', flexWrap: 'wrap', gap: 'touch', '& > *': { flex: '1' } },
 });

@@ -1,10 +1,12 @@
 import { chakra } from '@chakra-ui/react';
+import { stepOf, type Step } from '@lampwright/trace';
 import { useMemo } from 'react';
 import { HarnessDrawing, SuspicionBar } from '../../../drawing';
 import { useAccount } from '../../../lib/session-context';
-import { useTraceContext } from '../store/trace-session';
+import { useTraceContext, useTraceLog } from '../store/trace-session';
 import { useTraceWords } from '../words/use-trace-words';
 import { useOverlay } from './overlay';
+import { usePhone } from './use-phone';
 import { useMarks } from './use-marks';
 import { useSlices } from './use-slices';
 
@@ -32,6 +34,9 @@ const Legend = chakra('p', {
   },
 });
 
+/** The steps in which something is in question. */
+const HUNT: readonly Step[] = ['narrow', 'inspect', 'repair'];
+
 /** The trailer with what is known drawn on it, and the suspicion as a bar under it. */
 export function DrawingPane() {
   const t = useTraceWords();
@@ -41,6 +46,8 @@ export function DrawingPane() {
   const current = useTraceContext((context) => context.circuit);
   const marks = useMarks(overlay);
   const { slices, inQuestion, cleared } = useSlices();
+  const hunting = useTraceLog((log) => HUNT.includes(stepOf(log)));
+  const phone = usePhone();
   const circuit = overlay.circuit ?? current;
   const picking = useMemo(
     () => ({
@@ -57,10 +64,11 @@ export function DrawingPane() {
           circuit={circuit}
           marks={marks}
           lengths={lengths}
+          compact={phone}
           {...picking}
         />
       </Picture>
-      {slices.length > 0 && (
+      {hunting && slices.length > 0 && (
         <>
           <SuspicionBar slices={slices} />
           <Legend>

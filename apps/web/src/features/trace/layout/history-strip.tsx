@@ -69,7 +69,9 @@ export function HistoryStrip() {
   const undo = useUndo();
   const list = useRef<HTMLOListElement>(null);
   const openWords = (open: readonly string[]) =>
-    open.length === 0 ? t('page.allConnected') : t('page.open', { points: names.parts(open) });
+    open.length === 0
+      ? t('page.allConnected')
+      : t('page.open', { points: names.list(open.map(names.code)) });
   useEffect(() => {
     list.current?.lastElementChild?.scrollIntoView?.({ block: 'nearest', inline: 'end' });
   }, [powerUps.length]);

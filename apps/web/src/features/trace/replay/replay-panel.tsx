@@ -1,16 +1,25 @@
 import { chakra } from '@chakra-ui/react';
-import type { Step, TraceRecord } from '@lampwright/trace';
+import type { Step, TraceEvent, TraceRecord } from '@lampwright/trace';
 import { ChevronFirst, ChevronLast, ChevronLeft, ChevronRight } from 'lucide-react';
-import { Callout } from '../../../ui';
 import { FieldButton } from '../controls/field-button';
 import { Eyebrow, Panel, PanelAnswers, PanelBody, Row, Small, Text } from '../controls/panel';
 import { StepHeading } from '../controls/step-heading';
-import { Facts } from '../steps/facts';
 import { useTraceWords } from '../words/use-trace-words';
+import { ReplayEntries } from './replay-entries';
 import { useEventWords } from './use-event-words';
 
-const Entries = chakra('ol', {
-  base: { display: 'flex', flexDirection: 'column', gap: 'touch', listStyle: 'none' },
+const Current = chakra('div', {
+  base: {
+    display: 'flex',
+    flexDirection: 'column',
+    gap: '1.5',
+    paddingX: '5',
+    paddingTop: '4',
+    paddingBottom: '3',
+    minHeight: { md: '216px' },
+    borderBottomWidth: '1px',
+    borderColor: 'line',
+  },
 });
 
 interface ReplayPanelProps {
@@ -29,36 +38,29 @@ export function ReplayPanel({ record, at, step, onMove, onClose }: ReplayPanelPr
   const { events } = record;
   const event = events[at - 1];
   const of = events.length;
+  const nameOf = (each: TraceEvent) => capital(t(`event.${each.type}`));
   return (
     <Panel>
-      <PanelBody data-panel-scroll>
-        <Eyebrow>{t('replay.event', { at, of })}</Eyebrow>
-        <StepHeading screen="replay">
-          {event ? capital(t(`event.${event.type}`)) : t('replay.begun')}
-        </StepHeading>
+      <Current>
+        <Eyebrow>
+          {t('replay.event', { at, of })} · {t('replay.readOnly')}
+        </Eyebrow>
+        <StepHeading screen="replay">{event ? nameOf(event) : t('replay.begun')}</StepHeading>
         <div role="status">
           {event && <Text>{words(event)}</Text>}
-          <Small>{new Date(event?.at ?? record.openedAt).toLocaleString()}</Small>
+          <Small>
+            {new Date(event?.at ?? record.openedAt).toLocaleString()} ·{' '}
+            {t('replay.stepAfter', { step: t(`common:step.${step}`) })}
+          </Small>
         </div>
-        <Facts
-          facts={[{ key: 'step', name: t('replay.stepAfter'), value: t(`common:step.${step}`) }]}
+      </Current>
+      <PanelBody>
+        <ReplayEntries
+          events={events}
+          at={at}
+          words={(each) => words(each) || nameOf(each)}
+          onMove={onMove}
         />
-        <Callout>{t('replay.readOnly')}</Callout>
-        <Entries aria-label={t('replay.list')}>
-          {events.map((each, index) => (
-            <li key={each.id}>
-              <FieldButton
-                wide
-                justifyContent="flex-start"
-                textAlign="start"
-                pressed={index === at - 1}
-                onTap={() => onMove(index + 1)}
-              >
-                {index + 1}. {words(each) || capital(t(`event.${each.type}`))}
-              </FieldButton>
-            </li>
-          ))}
-        </Entries>
       </PanelBody>
       <PanelAnswers>
         <Row>
@@ -86,12 +88,8 @@ export function ReplayPanel({ record, at, step, onMove, onClose }: ReplayPanelPr
           <FieldButton icon={ChevronLast} disabled={at === of} onTap={() => onMove(of)}>
             {t('replay.last')}
           </FieldButton>
+          {onClose && <FieldButton onTap={onClose}>{t('replay.close')}</FieldButton>}
         </Row>
-        {onClose && (
-          <FieldButton wide onTap={onClose}>
-            {t('replay.close')}
-          </FieldButton>
-        )}
       </PanelAnswers>
     </Panel>
   );

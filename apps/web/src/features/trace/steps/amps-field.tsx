@@ -5,8 +5,9 @@ import {
   type CircuitId,
   type PartId,
 } from '@lampwright/harness';
-import { useMemo } from 'react';
+import { useMemo, useState } from 'react';
 import { TextInput } from '../../../ui';
+import { FieldButton } from '../controls/field-button';
 import { useTraceContext } from '../store/trace-session';
 import { useTraceWords } from '../words/use-trace-words';
 
@@ -18,7 +19,7 @@ interface AmpsFieldProps {
   onChange: (value: string) => void;
 }
 
-/** Amps for those who have a meter on it, with what a healthy circuit would draw beside. */
+/** Amps for those who have a meter on it, with what a healthy circuit would draw beside; folded away until asked for. */
 export function AmpsField({ circuit, open, value, onChange }: AmpsFieldProps) {
   const t = useTraceWords();
   const harness = useTraceContext((context) => context.record.plan.harness);
@@ -26,6 +27,14 @@ export function AmpsField({ circuit, open, value, onChange }: AmpsFieldProps) {
     const energised = energisedParts(sectionTree(harness, circuit), open);
     return expectedAmps(harness, circuit, energised);
   }, [harness, circuit, open]);
+  const [asked, setAsked] = useState(false);
+  if (!asked && value === '') {
+    return (
+      <FieldButton look="quiet" alignSelf="flex-start" onTap={() => setAsked(true)}>
+        {t('confirm.addAmps')}
+      </FieldButton>
+    );
+  }
   return (
     <TextInput
       size="field"

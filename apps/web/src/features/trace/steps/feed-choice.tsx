@@ -28,6 +28,7 @@ export function FeedChoice({ draft, change, offered = kinds }: FeedChoiceProps) 
       <Stack>
         {offered.map((kind) => (
           <ChoiceCard
+            single
             key={kind}
             label={t(`feed.${kind}.name`)}
             about={t(`feed.${kind}.about`)}
@@ -43,6 +44,7 @@ export function FeedChoice({ draft, change, offered = kinds }: FeedChoiceProps) 
           <Stack>
             {breakerTypes.map((type) => (
               <ChoiceCard
+                single
                 key={type}
                 label={t(`breakerType.type${type}`)}
                 about={t(`breakerType.type${type}about`)}
@@ -56,12 +58,14 @@ export function FeedChoice({ draft, change, offered = kinds }: FeedChoiceProps) 
       <Ask>{t('intake.atHand')}</Ask>
       <Stack>
         <ChoiceCard
+          single
           label={t('intake.atHandYes')}
           about={t('intake.atHandYesAbout')}
           chosen={draft.atHand === true}
           onTap={() => change({ atHand: true })}
         />
         <ChoiceCard
+          single
           label={t('intake.atHandNo')}
           chosen={draft.atHand === false}
           onTap={() => change({ atHand: false })}

@@ -34,7 +34,8 @@ export function OrderOfDoing({ feed, toClose, toOpen }: OrderOfDoingProps) {
       }),
     })),
   ];
-  const several = toClose.length + toOpen.length > 1;
+  // One alone has its place said under the instruction.
+  const several = toOpen.length > 1;
   return (
     <Callout tone="caution" title={t(`feed.${feed.kind}.off`)}>
       <List aria-label={t('narrow.orderTitle')}>

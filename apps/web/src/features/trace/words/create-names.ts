@@ -13,6 +13,8 @@ export interface Names {
   /** With its contact and colour: "Clearance (pin 2, black)". */
   circuitWithPin: (id: CircuitId) => string;
   part: (id: PartId) => string;
+  /** A part as briefly as its label allows: its leading code, as "P3", else the whole. */
+  code: (id: PartId) => string;
   /** Where to find a part, in the plan's words; empty where the plan says nothing. */
   where: (id: PartId) => string;
   place: (ref: PlaceRef) => string;
@@ -39,6 +41,7 @@ export function createNames(harness: Harness, t: TraceWords): Names {
       return marks.length > 0 ? `${circuit(id)} (${marks.join(', ')})` : circuit(id);
     },
     part,
+    code: (id) => /^\p{Lu}{1,3}-?\d{1,3}[a-z]?(?=\s|$)/u.exec(part(id))?.[0] ?? part(id),
     where: (id) => partById.get(id)?.where ?? '',
     place: (ref) => {
       if (ref.kind === 'run') {

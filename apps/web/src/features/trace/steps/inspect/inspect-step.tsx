@@ -1,5 +1,6 @@
 import { placeKey, type PlaceRef } from '@lampwright/harness';
 import { samePlace, situation } from '@lampwright/trace';
+import { Crosshair } from 'lucide-react';
 import { useCallback, useMemo, useState } from 'react';
 import { Callout } from '../../../../ui';
 import { AnswerButton } from '../../controls/answer-button';
@@ -92,7 +93,12 @@ export function InspectStep() {
           ))}
         </Row>
         <Stack>
-          <AnswerButton tone="overload" label={t('inspect.found')} onTap={() => say('found')} />
+          <AnswerButton
+            tone="overload"
+            icon={Crosshair}
+            label={t('inspect.found')}
+            onTap={() => say('found')}
+          />
           <AnswerButton tone="holds" label={t('inspect.clear')} onTap={() => say('clear')} />
         </Stack>
       </PanelAnswers>

@@ -29,7 +29,7 @@ export function PlaceList({ places, current, onPick }: PlaceListProps) {
           onTap={() => onPick(ref)}
         >
           <span>{names.place(ref)}</span>
-          <span>
+          <span style={{ whiteSpace: 'nowrap' }}>
             {clear
               ? t('inspect.done')
               : t('inspect.likely', { percent: Math.max(1, Math.round(probability * 100)) })}

@@ -1,5 +1,5 @@
 import { ChoiceCard } from '../../controls/choice-card';
-import { FieldButton, GoOnButton } from '../../controls/field-button';
+import { FieldButton, GoBackButton, GoOnButton } from '../../controls/field-button';
 import { Panel, PanelAnswers, PanelBody, Row, Small, Stack } from '../../controls/panel';
 import { StepHeading } from '../../controls/step-heading';
 import { useTraceContext } from '../../store/trace-session';
@@ -42,9 +42,7 @@ export function CircuitsScreen({ draft, change, back, next }: IntakeScreenProps)
       </PanelBody>
       <PanelAnswers>
         <Row>
-          <FieldButton size="answer" justifyContent="center" onTap={back}>
-            {t('intake.back')}
-          </FieldButton>
+          <GoBackButton onTap={back}>{t('intake.back')}</GoBackButton>
           <GoOnButton disabled={draft.circuits.length === 0} onTap={next}>
             {t('intake.next')}
           </GoOnButton>

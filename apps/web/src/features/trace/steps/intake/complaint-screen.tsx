@@ -25,6 +25,7 @@ export function ComplaintScreen({ draft, change, next }: Omit<IntakeScreenProps,
         <Stack>
           {complaints.map((id) => (
             <ChoiceCard
+              single
               key={id}
               label={t(`intake.choices.${id}`)}
               chosen={draft.complaint === id}

@@ -1,4 +1,4 @@
-import { FieldButton, GoOnButton } from '../../controls/field-button';
+import { GoBackButton, GoOnButton } from '../../controls/field-button';
 import { Panel, PanelAnswers, PanelBody, Row, Small } from '../../controls/panel';
 import { StepHeading } from '../../controls/step-heading';
 import { useTraceWords } from '../../words/use-trace-words';
@@ -22,9 +22,7 @@ export function FeedScreen({
       </PanelBody>
       <PanelAnswers>
         <Row>
-          <FieldButton size="answer" justifyContent="center" onTap={back}>
-            {t('intake.back')}
-          </FieldButton>
+          <GoBackButton onTap={back}>{t('intake.back')}</GoBackButton>
           <GoOnButton disabled={!complete} onTap={next}>
             {t('intake.done')}
           </GoOnButton>

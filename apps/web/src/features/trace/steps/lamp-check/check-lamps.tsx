@@ -3,7 +3,7 @@ import type { LampResult, LampsOfCircuit } from '@lampwright/trace';
 import { useCallback, useMemo, useState } from 'react';
 import { Callout } from '../../../../ui';
 import { AnswerButton } from '../../controls/answer-button';
-import { FieldButton, GoOnButton } from '../../controls/field-button';
+import { GoBackButton, GoOnButton } from '../../controls/field-button';
 import { Eyebrow, Panel, PanelAnswers, PanelBody, Row, Stack } from '../../controls/panel';
 import { StepHeading } from '../../controls/step-heading';
 import { useShowOnDrawing } from '../../layout/overlay';
@@ -94,9 +94,7 @@ export function CheckLamps({ check, at, of, oneByOne, done }: CheckLampsProps) {
         )}
         {!listing && (
           <Row>
-            <FieldButton size="answer" justifyContent="center" onTap={() => setListing(true)}>
-              {t('lampCheck.one')}
-            </FieldButton>
+            <GoBackButton onTap={() => setListing(true)}>{t('lampCheck.one')}</GoBackButton>
           </Row>
         )}
       </PanelAnswers>

@@ -44,6 +44,7 @@ export function BarScreen({ points, plan = false, back }: BarScreenProps) {
           <Stack>
             {points.map((each) => (
               <ChoiceCard
+                single
                 key={each}
                 label={names.part(each)}
                 about={names.where(each)}

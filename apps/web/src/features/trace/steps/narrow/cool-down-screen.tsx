@@ -1,6 +1,6 @@
 import { useState } from 'react';
 import { Callout } from '../../../../ui';
-import { FieldButton, GoOnButton } from '../../controls/field-button';
+import { GoBackButton, GoOnButton } from '../../controls/field-button';
 import { Panel, PanelAnswers, PanelBody, Small, Text } from '../../controls/panel';
 import { StepHeading } from '../../controls/step-heading';
 import { useRecord, useTraceContext } from '../../store/trace-session';
@@ -29,14 +29,9 @@ export function CoolDownScreen() {
         <GoOnButton wide onTap={() => setChanging(true)}>
           {t('coolDown.gentler')}
         </GoOnButton>
-        <FieldButton
-          wide
-          size="answer"
-          justifyContent="center"
-          onTap={() => void record({ type: 'coolDown.taken' })}
-        >
+        <GoBackButton wide onTap={() => void record({ type: 'coolDown.taken' })}>
           {t('coolDown.done')}
-        </FieldButton>
+        </GoBackButton>
       </PanelAnswers>
     </Panel>
   );

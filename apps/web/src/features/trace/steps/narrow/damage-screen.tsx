@@ -3,7 +3,7 @@ import { situation } from '@lampwright/trace';
 import { useCallback, useMemo } from 'react';
 import { useAnnounce } from '../../controls/announcer';
 import { AnswerButton } from '../../controls/answer-button';
-import { FieldButton } from '../../controls/field-button';
+import { GoBackButton } from '../../controls/field-button';
 import { Panel, PanelAnswers, PanelBody, Small, Stack } from '../../controls/panel';
 import { StepHeading } from '../../controls/step-heading';
 import { useShowOnDrawing } from '../../layout/overlay';
@@ -47,9 +47,9 @@ export function DamageScreen({ back }: { back: () => void }) {
         </Stack>
       </PanelBody>
       <PanelAnswers>
-        <FieldButton wide size="answer" justifyContent="center" onTap={back}>
+        <GoBackButton wide onTap={back}>
           {t('narrow.cancel')}
-        </FieldButton>
+        </GoBackButton>
       </PanelAnswers>
     </Panel>
   );

@@ -1,6 +1,6 @@
 import { suspectedCircuits } from '@lampwright/trace';
 import { AnswerButton } from '../../controls/answer-button';
-import { FieldButton } from '../../controls/field-button';
+import { GoBackButton } from '../../controls/field-button';
 import { Panel, PanelAnswers, PanelBody, Stack } from '../../controls/panel';
 import { StepHeading } from '../../controls/step-heading';
 import { useRecord, useTraceContext } from '../../store/trace-session';
@@ -60,9 +60,9 @@ export function ElseScreen({ go, back }: ElseScreenProps) {
         <Callout tone="caution">{t('coolDown.stop')}</Callout>
       </PanelBody>
       <PanelAnswers>
-        <FieldButton wide size="answer" justifyContent="center" onTap={back}>
+        <GoBackButton wide onTap={back}>
           {t('narrow.cancel')}
-        </FieldButton>
+        </GoBackButton>
       </PanelAnswers>
     </Panel>
   );

@@ -1,6 +1,6 @@
 import type { FeedKind } from '@lampwright/trace';
 import { useState } from 'react';
-import { FieldButton, GoOnButton } from '../../controls/field-button';
+import { GoBackButton, GoOnButton } from '../../controls/field-button';
 import { Panel, PanelAnswers, PanelBody, Row } from '../../controls/panel';
 import { StepHeading } from '../../controls/step-heading';
 import { useRecord, useTraceContext } from '../../store/trace-session';
@@ -38,9 +38,7 @@ export function FeedChangeScreen({ offered, back }: FeedChangeScreenProps) {
       </PanelBody>
       <PanelAnswers>
         <Row>
-          <FieldButton size="answer" justifyContent="center" onTap={back}>
-            {t('narrow.cancel')}
-          </FieldButton>
+          <GoBackButton onTap={back}>{t('narrow.cancel')}</GoBackButton>
           <GoOnButton disabled={!next} onTap={() => void use()}>
             {t('feedChange.use')}
           </GoOnButton>

@@ -3,7 +3,7 @@ import { isUnchanged, situation } from '@lampwright/trace';
 import { useCallback, useMemo, useState } from 'react';
 import { Callout } from '../../../../ui';
 import { ChoiceCard } from '../../controls/choice-card';
-import { FieldButton, GoOnButton } from '../../controls/field-button';
+import { FieldButton, GoBackButton, GoOnButton } from '../../controls/field-button';
 import { Ask, Panel, PanelAnswers, PanelBody, Row, Small, Stack, Text } from '../../controls/panel';
 import { StepHeading } from '../../controls/step-heading';
 import { useShowOnDrawing } from '../../layout/overlay';
@@ -34,6 +34,11 @@ export function PickScreen({ next, touched, back }: PickScreenProps) {
   const [picked, setPicked] = useState<readonly PartId[]>(() =>
     touched === null ? next.open.filter((point) => pickable.has(point)) : [touched],
   );
+  // What is picked on coming here stands first, where it is seen; the order then stays.
+  const [first] = useState(picked);
+  const ordered = [...parts].sort(
+    (a, b) => Number(first.includes(b.id)) - Number(first.includes(a.id)),
+  );
   const toggle = useCallback(
     (point: PartId) =>
       setPicked((points) =>
@@ -61,7 +66,7 @@ export function PickScreen({ next, touched, back }: PickScreenProps) {
         <StepHeading screen="pick">{t('narrow.pickTitle')}</StepHeading>
         <Small>{t('narrow.pickHelp')}</Small>
         <Stack>
-          {parts.map((part) => (
+          {ordered.map((part) => (
             <ChoiceCard
               key={part.id}
               label={part.label}
@@ -98,9 +103,7 @@ export function PickScreen({ next, touched, back }: PickScreenProps) {
           )}
         </div>
         <Row>
-          <FieldButton size="answer" justifyContent="center" onTap={back}>
-            {t('narrow.cancel')}
-          </FieldButton>
+          <GoBackButton onTap={back}>{t('narrow.cancel')}</GoBackButton>
           <GoOnButton disabled={unchanged} onTap={() => void use()}>
             {t('narrow.pickUse')}
           </GoOnButton>

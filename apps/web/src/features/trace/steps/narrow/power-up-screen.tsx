@@ -38,7 +38,7 @@ export function PowerUpScreen({ next, go, pick }: PowerUpScreenProps) {
   const hunt = useTraceContext((context) => context.hunt);
   const count = useTraceContext((context) => context.powerUps.length);
   const about = useAnswerMeanings(next.open);
-  const [amps, setAmps] = useState<string | null>(null);
+  const [amps, setAmps] = useState('');
   const { pickable } = usePoints();
   useShowOnDrawing(
     useMemo(() => ({ cut: next.toOpen, pickable, onPick: pick }), [next.toOpen, pickable, pick]),
@@ -51,7 +51,7 @@ export function PowerUpScreen({ next, go, pick }: PowerUpScreenProps) {
       circuit,
       open: next.open,
       outcome,
-      ...readAmps(amps ?? ''),
+      ...readAmps(amps),
       advised: next.advised.open,
     });
     if (done) announce(t('narrow.recorded', { outcome: outcomeWords(outcome, feed, t) }));
@@ -76,13 +76,7 @@ export function PowerUpScreen({ next, go, pick }: PowerUpScreenProps) {
         )}
         <OrderOfDoing feed={feed} toClose={next.toClose} toOpen={next.toOpen} />
         <Reason next={next} />
-        {amps === null ? (
-          <FieldButton look="quiet" onTap={() => setAmps('')}>
-            {t('narrow.addAmps')}
-          </FieldButton>
-        ) : (
-          <AmpsField circuit={circuit} open={next.open} value={amps} onChange={setAmps} />
-        )}
+        <AmpsField circuit={circuit} open={next.open} value={amps} onChange={setAmps} />
       </PanelBody>
       <PanelAnswers>
         <PowerOn feed={feed} circuit={circuit} />
@@ -92,7 +86,7 @@ export function PowerUpScreen({ next, go, pick }: PowerUpScreenProps) {
             {t('narrow.cantReach')}
           </FieldButton>
           <FieldButton onTap={() => go('pick')}>{t('narrow.another')}</FieldButton>
-          <FieldButton onTap={() => go('else')}>{t('narrow.somethingElse')}</FieldButton>
+          <FieldButton onTap={() => go('else')}>{t('narrow.more')}</FieldButton>
         </Row>
       </PanelAnswers>
     </Panel>

@@ -1,6 +1,6 @@
 import { TextArea } from '../../../../ui';
 import { FieldButton } from '../../controls/field-button';
-import { Ask, Row } from '../../controls/panel';
+import { Ask, Pairs } from '../../controls/panel';
 import { useTraceWords } from '../../words/use-trace-words';
 
 interface ChoiceOrWordsProps<Id extends string> {
@@ -20,7 +20,7 @@ export function ChoiceOrWords<Id extends string>(props: ChoiceOrWordsProps<Id>) 
   return (
     <div role="group" aria-label={title}>
       <Ask>{title}</Ask>
-      <Row marginTop="2">
+      <Pairs marginTop="2">
         {choices.map((id) => (
           <FieldButton key={id} pressed={chosen === id} onTap={() => onChoose(id)}>
             {labelOf(id)}
@@ -29,7 +29,7 @@ export function ChoiceOrWords<Id extends string>(props: ChoiceOrWordsProps<Id>) 
         <FieldButton pressed={chosen === 'other'} onTap={() => onChoose('other')}>
           {t('repair.other')}
         </FieldButton>
-      </Row>
+      </Pairs>
       {chosen === 'other' && (
         <TextArea
           size="field"

@@ -1,6 +1,6 @@
 import type { PartUsed } from '@lampwright/trace';
 import { FieldButton } from '../../controls/field-button';
-import { Ask, Row } from '../../controls/panel';
+import { Ask, Pairs } from '../../controls/panel';
 import { Stepper } from '../../controls/stepper';
 import { useTraceWords } from '../../words/use-trace-words';
 import { partChoices } from './choices';
@@ -33,7 +33,7 @@ export function PartsUsed({ parts, onChange }: PartsUsedProps) {
           onChange={(value) => change(name, value)}
         />
       ))}
-      <Row marginTop="2">
+      <Pairs marginTop="2">
         {partChoices
           .map((id) => t(`repair.partChoices.${id}`))
           .filter((name) => !parts.some((part) => part.name === name))
@@ -42,7 +42,7 @@ export function PartsUsed({ parts, onChange }: PartsUsedProps) {
               {name}
             </FieldButton>
           ))}
-      </Row>
+      </Pairs>
     </div>
   );
 }
