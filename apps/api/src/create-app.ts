@@ -4,6 +4,7 @@ import compression from 'compression';
 import cookieParser from 'cookie-parser';
 import { Logger } from 'nestjs-pino';
 import { AppModule } from './app.module';
+import { apiCaching } from './common/api-caching';
 import { useBodyParsers } from './common/body-parsers';
 import { DOCS_PATH, useOpenApi } from './common/open-api';
 import { requestId } from './common/request-id';
@@ -26,6 +27,7 @@ export async function createApp(settings: Settings): Promise<NestExpressApplicat
   app.use(requestId);
   app.use(securityHeaders(settings.https));
   app.use(`/${DOCS_PATH}`, docsHeaders(settings.https));
+  app.use('/api', apiCaching);
   app.use(compression());
   app.use(cookieParser());
   useBodyParsers(app);

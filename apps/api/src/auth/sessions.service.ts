@@ -7,7 +7,7 @@ import { ProblemException } from '../common/problem.exception';
 import type { Person } from '../people/person.entity';
 import type { AccessClaims } from './access-claims';
 import { ACCESS_SECONDS, REFRESH_SECONDS, type Tokens } from './cookies';
-import { createRefreshToken, parseRefreshToken } from './refresh-token';
+import { createRefreshToken, parseRefreshToken, type RefreshToken } from './refresh-token';
 import { Session } from './session.entity';
 import type { SignedIn } from './signed-in';
 
@@ -23,9 +23,10 @@ export class SessionsService {
     private readonly clock: Clock,
   ) {}
 
-  /** Begins a session. The caller flushes. */
+  /** Begins a session, and forgets those of the person that are too old to be used. The caller flushes. */
   async start(person: Person, deviceName: string): Promise<Tokens> {
     const now = this.clock.now();
+    await this.em.nativeDelete(Session, { person: person.id, expiresAt: { $lte: now } });
     const id = uuidv7();
     const token = createRefreshToken(id);
     this.em.create(Session, {
@@ -42,28 +43,33 @@ export class SessionsService {
 
   /**
    * Replaces the tokens of a session. A refresh token that was replaced before, and not a moment ago, was copied:
-   * the session ends for whoever holds it.
+   * the session ends for whoever holds it. One transaction, since two tabs may ask at once and both must go on.
    */
   async refresh(text: string): Promise<Tokens & SignedIn> {
     const presented = parseRefreshToken(text);
     if (!presented) throw new ProblemException('sessionEnded');
+    const refreshed = await this.em.transactional(() => this.rotate(presented));
+    if (!refreshed) throw new ProblemException('sessionEnded');
+    const { session, person, refresh } = refreshed;
+    return { session, person, refresh, access: await this.accessToken(person.id, session.id) };
+  }
+
+  /** Gives the new refresh token; ends the session and gives nothing for one that was copied. */
+  private async rotate(presented: RefreshToken): Promise<(SignedIn & { refresh: string }) | null> {
     const { session, person } = await this.requireLive(presented.sessionId);
     const now = this.clock.now();
     const retired = session.retired.filter(({ until }) => until > now.getTime());
     const valid = [session.tokenHash, ...retired.map(({ hash }) => hash)];
     if (!valid.includes(presented.hash)) {
       session.endedAt = now;
-      await this.em.flush();
-      throw new ProblemException('sessionEnded');
+      return null;
     }
     const next = createRefreshToken(session.id);
     session.retired = [...retired, { hash: session.tokenHash, until: now.getTime() + GRACE_MS }];
     session.tokenHash = next.hash;
     session.lastUsedAt = now;
     session.expiresAt = after(now, REFRESH_SECONDS);
-    await this.em.flush();
-    const access = await this.accessToken(person.id, session.id);
-    return { access, refresh: next.text, session, person };
+    return { session, person, refresh: next.text };
   }
 
   /** @throws ProblemException `sessionEnded` or `accountClosed`. */

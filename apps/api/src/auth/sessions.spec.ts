@@ -56,6 +56,15 @@ describe('a refresh token', () => {
     await refreshWith(refreshCookie(again.headers['set-cookie'])).expect(200);
   });
 
+  it('used by two tabs at once lets both go on', async () => {
+    const first = await signInForTokens();
+    const answers = await Promise.all([refreshWith(first), refreshWith(first)]);
+    const cookies = answers.map(({ headers }) => refreshCookie(headers['set-cookie']));
+    expect(new Set(cookies).size).toBe(2);
+    // The browser keeps whichever answer came last.
+    for (const cookie of cookies) await refreshWith(cookie).expect(200);
+  });
+
   it('ends the session for everybody when it is used again later: it was copied', async () => {
     const first = await signInForTokens();
     const answer = await refreshWith(first).expect(200);

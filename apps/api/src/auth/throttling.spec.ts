@@ -25,3 +25,24 @@ it('limits how often one person may ask, and others not', async () => {
   await other.get('/api/auth/account').expect(200);
   await server.close();
 });
+
+describe('people who are not signed in', () => {
+  const askFrom = async (trustProxy: number | false) => {
+    const server = await startTestServer({ requestsPerMinute: 2, trustProxy });
+    const ask = (address: string) =>
+      server.client().get('/api/health').set('X-Forwarded-For', address);
+    await ask('192.0.2.1');
+    await ask('192.0.2.1');
+    const { status } = await ask('192.0.2.2');
+    await server.close();
+    return status;
+  };
+
+  it('are counted by their address, which they cannot choose', async () => {
+    expect(await askFrom(false)).toBe(429);
+  });
+
+  it('are told apart behind a proxy that is trusted', async () => {
+    expect(await askFrom(1)).toBe(200);
+  });
+});

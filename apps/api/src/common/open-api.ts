@@ -5,7 +5,7 @@ import { cookieNames } from '../auth/cookies';
 export const DOCS_PATH = 'api/docs';
 
 /** Describes every route of the application. */
-export function createOpenApiDocument(app: NestExpressApplication, https: boolean): OpenAPIObject {
+function createOpenApiDocument(app: NestExpressApplication, https: boolean): OpenAPIObject {
   const config = new DocumentBuilder()
     .setTitle('Lampwright')
     .setDescription(

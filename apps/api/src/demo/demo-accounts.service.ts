@@ -5,13 +5,25 @@ import { verifyPassword } from '../auth/passwords';
 import { Person } from '../people/person.entity';
 import { DEMO_PASSWORD } from './demo-password';
 
+type DemoPerson = Pick<Person, 'name' | 'email' | 'role'>;
+
 /** Finds the demo accounts that anybody can still use. */
 @Injectable()
 export class DemoAccountsService {
+  private found: Promise<DemoPerson[]> | null = null;
+
   constructor(private readonly em: EntityManager) {}
 
-  /** Open demo accounts whose password is still the published one, leads first. */
-  async list(): Promise<Pick<Person, 'name' | 'email' | 'role'>[]> {
+  /**
+   * Open demo accounts whose password is still the published one, leads first. Looked up once a start: a hash an
+   * account is too dear for a route that strangers may call.
+   */
+  list(): Promise<DemoPerson[]> {
+    this.found ??= this.look();
+    return this.found;
+  }
+
+  private async look(): Promise<DemoPerson[]> {
     const people = await this.em
       .fork()
       .find(

@@ -1,7 +1,7 @@
 import { execFileSync, spawn, type ChildProcess } from 'node:child_process';
 import { createServer, type Server } from 'node:net';
 import { once } from 'node:events';
-import { mkdtempSync, rmSync, writeFileSync } from 'node:fs';
+import { mkdtempSync, readdirSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join, resolve } from 'node:path';
 import { explainFailure } from './explain-failure';
@@ -60,6 +60,8 @@ describe('the program', () => {
     expect((await fetch(`${address}/api/health`)).status).toBe(200);
     run.process.kill('SIGTERM');
     expect(await run.ended).toBe(0);
+    expect(readdirSync(folder)).toContain('lampwright.sqlite');
+    expect(readdirSync(folder)).not.toContain('lampwright.sqlite-wal');
   }, 60_000);
 
   it('says that its port is taken', async () => {

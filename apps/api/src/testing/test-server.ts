@@ -27,6 +27,7 @@ export interface TestServer {
   close(): Promise<void>;
 }
 
+/** Passport keeps its strategies for the whole process, so only the server started last can tell who is signed in. */
 export async function startTestServer(change: Partial<Settings> = {}): Promise<TestServer> {
   const dataDir = change.dataDir ?? mkdtempSync(join(tmpdir(), 'lampwright-'));
   const settings: Settings = {

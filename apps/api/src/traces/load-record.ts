@@ -34,7 +34,7 @@ export async function loadRecord(em: EntityManager, trace: Trace): Promise<Trace
 }
 
 /** The event as it was sent. */
-export function toTraceEvent(stored: StoredEvent): TraceEvent {
+function toTraceEvent(stored: StoredEvent): TraceEvent {
   const { id, device, seq, at, type, body } = stored;
   return { id, device, seq, at, by: stored.author.id, type, ...body } as TraceEvent;
 }

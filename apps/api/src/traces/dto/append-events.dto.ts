@@ -8,7 +8,7 @@ import { TRACE_EVENT_TYPES, type Refusal, type Step, type TraceEvent } from '@la
 import { ArrayMaxSize, ArrayMinSize, IsArray, IsObject } from 'class-validator';
 import { STEPS } from './trace-values';
 
-export const MAX_BATCH = 100;
+const MAX_BATCH = 100;
 
 /** Body that adds events. What an event must be is the trace machine's to say. */
 export class AppendEventsDto implements AppendEventsRequest {
