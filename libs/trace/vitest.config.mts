@@ -1,4 +1,8 @@
 import { defineConfig } from 'vitest/config';
 import { libraryTest } from '../../tools/vitest.shared.mts';
 
-export default defineConfig(libraryTest);
+// Whole traces are played in the laws: seconds on a busy machine.
+export default defineConfig({
+  ...libraryTest,
+  test: { ...libraryTest.test, testTimeout: 60_000 },
+});
