@@ -1,5 +1,6 @@
 import { useParams } from 'react-router-dom';
 import { ErrorState, Loading, Page } from '../../ui';
+import { TapGuardProvider } from './controls/tap-guard';
 import { ReplayScreen } from './replay/replay-screen';
 import { useTrace } from './store/use-trace';
 import { TraceScreen } from './trace-screen';
@@ -22,8 +23,16 @@ export function TracePage() {
         </Page>
       );
     case 'reading':
-      return <ReplayScreen record={trace.record} />;
+      return (
+        <TapGuardProvider>
+          <ReplayScreen record={trace.record} />
+        </TapGuardProvider>
+      );
     case 'writing':
-      return <TraceScreen store={trace.store} />;
+      return (
+        <TapGuardProvider>
+          <TraceScreen store={trace.store} />
+        </TapGuardProvider>
+      );
   }
 }

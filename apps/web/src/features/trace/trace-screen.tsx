@@ -1,6 +1,5 @@
 import { useState, useSyncExternalStore, useMemo } from 'react';
 import { Announcer } from './controls/announcer';
-import { TapGuardProvider } from './controls/tap-guard';
 import { DrawingPane } from './layout/drawing-pane';
 import { HeaderStrip } from './layout/header-strip';
 import { HistoryStrip } from './layout/history-strip';
@@ -23,25 +22,23 @@ export function TraceScreen({ store }: { store: TraceStore }) {
     return <ReplayScreen record={record} onClose={() => setReplaying(false)} />;
   }
   return (
-    <TapGuardProvider>
-      <Announcer>
-        <TraceSessionProvider value={session}>
-          <OverlayProvider>
-            <TraceLayout
-              head={
-                <HeaderStrip>
-                  <SentState store={store} />
-                </HeaderStrip>
-              }
-              plan={<DrawingPane />}
-              past={<HistoryStrip />}
-            >
-              <Trouble store={store} />
-              <StepPanel onReplay={() => setReplaying(true)} />
-            </TraceLayout>
-          </OverlayProvider>
-        </TraceSessionProvider>
-      </Announcer>
-    </TapGuardProvider>
+    <Announcer>
+      <TraceSessionProvider value={session}>
+        <OverlayProvider>
+          <TraceLayout
+            head={
+              <HeaderStrip>
+                <SentState store={store} />
+              </HeaderStrip>
+            }
+            plan={<DrawingPane />}
+            past={<HistoryStrip />}
+          >
+            <Trouble store={store} />
+            <StepPanel onReplay={() => setReplaying(true)} />
+          </TraceLayout>
+        </OverlayProvider>
+      </TraceSessionProvider>
+    </Announcer>
   );
 }

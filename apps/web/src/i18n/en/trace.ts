@@ -503,7 +503,7 @@ export default {
     eyebrow: 'Prove',
     closeFirst: 'Plug back in first',
     closeFirstHelp:
-      'Power off. With these open the repaired place would get no power, and the proof would mean nothing.',
+      'With these open the repaired place would get no power, and the proof would mean nothing.',
     plugged: 'Plugged in: {{point}}',
     overloadAbout: 'There is another short: back to narrowing, with what is known kept',
     holdsAbout: 'The short is gone',

@@ -35,13 +35,25 @@ export const PanelAnswers = chakra('div', {
     gap: 'touch',
     paddingX: { base: '4', md: '5' },
     paddingTop: '3',
-    paddingBottom: '4',
+    paddingBottom: '3',
     bg: 'bg.panel',
     borderTopWidth: '1px',
     borderColor: 'line',
     position: { base: 'sticky', md: 'static' },
     bottom: '0',
     zIndex: 'bar',
+  },
+});
+
+/** What comes under the answers; on a phone it is scrolled to. */
+export const PanelMore = chakra('div', {
+  base: {
+    display: 'flex',
+    flexDirection: 'column',
+    gap: 'touch',
+    paddingX: { base: '4', md: '5' },
+    paddingBottom: '4',
+    bg: 'bg.panel',
   },
 });
 

@@ -22,11 +22,12 @@ const Pane = chakra('div', {
   },
 });
 const Picture = chakra('div', {
-  base: { flex: '1', minHeight: { base: '168px', md: '0' }, height: { base: '168px', md: 'auto' } },
+  base: { flex: '1', minHeight: { base: '130px', md: '0' }, height: { base: '130px', md: 'auto' } },
 });
 const Legend = chakra('p', {
   base: {
-    display: { base: 'none', md: 'flex' },
+    display: 'flex',
+    paddingX: { base: '2', md: '0' },
     flexWrap: 'wrap',
     columnGap: '5',
     fontSize: 'sm',
@@ -70,7 +71,7 @@ export function DrawingPane() {
       </Picture>
       {hunting && slices.length > 0 && (
         <>
-          <SuspicionBar slices={slices} />
+          {!phone && <SuspicionBar slices={slices} />}
           <Legend>
             <span>{t('narrow.inQuestion', { count: inQuestion })}</span>
             <span>{t('narrow.cleared', { count: cleared })}</span>

@@ -10,6 +10,8 @@ export function useEventWords(): (event: TraceEvent) => string {
   const t = useTraceWords();
   const names = useNames();
   const feed = useTraceContext((context) => context.feed);
+  const secondSources = useTraceContext((context) => context.record.trailer.secondSources);
+  const sources = names.list(secondSources.map((source) => t(`source.${source}`)));
   const openWords = (open: readonly string[]) =>
     open.length === 0 ? t('page.allConnected') : t('page.open', { points: names.parts(open) });
   const outcome = (circuit: string, seen: Parameters<typeof outcomeWords>[0]) =>
@@ -26,7 +28,7 @@ export function useEventWords(): (event: TraceEvent) => string {
           feed: t(`feed.${event.feed.kind}.name`),
         });
       case 'caution.ticked':
-        return t(`caution.${event.caution}.text`, { sources: '' });
+        return t(`caution.${event.caution}.text`, { sources });
       case 'circuit.confirmed':
       case 'wiggle.read':
       case 'proof.read':

@@ -2,7 +2,7 @@ import { circuitsToProve, pointsToCloseFirst, type Seen } from '@lampwright/trac
 import { useState } from 'react';
 import { Callout } from '../../../ui';
 import { useAnnounce } from '../controls/announcer';
-import { Eyebrow, Panel, PanelAnswers, PanelBody } from '../controls/panel';
+import { Eyebrow, Panel, PanelBody } from '../controls/panel';
 import { StepHeading } from '../controls/step-heading';
 import { useRecord, useTraceContext } from '../store/trace-session';
 import { useNames } from '../words/use-names';
@@ -55,14 +55,12 @@ export function ProveStep() {
         </Callout>
         <AmpsField circuit={circuit} open={context.open} value={amps} onChange={setAmps} />
       </PanelBody>
-      <PanelAnswers>
-        <PowerOn feed={feed} circuit={circuit} />
-        <ReadingAnswers
-          feed={feed}
-          about={{ overload: t('prove.overloadAbout'), holds: t('prove.holdsAbout') }}
-          onAnswer={(outcome) => void answer(outcome)}
-        />
-      </PanelAnswers>
+      <ReadingAnswers
+        ask={<PowerOn feed={feed} circuit={circuit} />}
+        feed={feed}
+        about={{ overload: t('prove.overloadAbout'), holds: t('prove.holdsAbout') }}
+        onAnswer={(outcome) => void answer(outcome)}
+      />
     </Panel>
   );
 }

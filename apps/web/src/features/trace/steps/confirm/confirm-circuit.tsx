@@ -3,7 +3,7 @@ import type { Seen } from '@lampwright/trace';
 import { useMemo, useState } from 'react';
 import { Callout } from '../../../../ui';
 import { useAnnounce } from '../../controls/announcer';
-import { Eyebrow, Panel, PanelAnswers, PanelBody } from '../../controls/panel';
+import { Eyebrow, Panel, PanelBody } from '../../controls/panel';
 import { StepHeading } from '../../controls/step-heading';
 import { useShowOnDrawing } from '../../layout/overlay';
 import { useRecord, useTraceContext } from '../../store/trace-session';
@@ -44,14 +44,12 @@ export function ConfirmCircuit({ circuit }: { circuit: CircuitId }) {
         </Callout>
         <AmpsField circuit={circuit} open={NOTHING_OPEN} value={amps} onChange={setAmps} />
       </PanelBody>
-      <PanelAnswers>
-        <PowerOn feed={feed} circuit={circuit} />
-        <ReadingAnswers
-          feed={feed}
-          onAnswer={(outcome) => void answer(outcome)}
-          onDark={() => void answer('dark')}
-        />
-      </PanelAnswers>
+      <ReadingAnswers
+        ask={<PowerOn feed={feed} circuit={circuit} />}
+        feed={feed}
+        onAnswer={(outcome) => void answer(outcome)}
+        onDark={() => void answer('dark')}
+      />
     </Panel>
   );
 }

@@ -31,17 +31,16 @@ export function NothingWrong() {
           <Text>{t('confirm.wiggleHelp')}</Text>
           <Callout tone="caution">{t('caution.noHolding.text')}</Callout>
         </PanelBody>
-        <PanelAnswers>
-          <Ask>{t(`feed.${feed.kind}.ask`)}</Ask>
-          <ReadingAnswers
-            feed={feed}
-            onAnswer={(outcome) => {
-              setWiggling(null);
-              void record({ type: 'wiggle.read', circuit: wiggling, outcome });
-            }}
-          />
+        <ReadingAnswers
+          ask={<Ask>{t(`feed.${feed.kind}.ask`)}</Ask>}
+          feed={feed}
+          onAnswer={(outcome) => {
+            setWiggling(null);
+            void record({ type: 'wiggle.read', circuit: wiggling, outcome });
+          }}
+        >
           <FieldButton onTap={() => setWiggling(null)}>{t('intake.back')}</FieldButton>
-        </PanelAnswers>
+        </ReadingAnswers>
       </Panel>
     );
   }

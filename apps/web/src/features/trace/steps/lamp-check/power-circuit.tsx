@@ -1,8 +1,8 @@
 import type { CircuitId } from '@lampwright/harness';
-import type { Seen } from '@lampwright/trace';
+import type { Feed, Seen } from '@lampwright/trace';
 import { useMemo } from 'react';
 import { Callout } from '../../../../ui';
-import { Eyebrow, Panel, PanelAnswers, PanelBody } from '../../controls/panel';
+import { Eyebrow, Panel, PanelBody } from '../../controls/panel';
 import { StepHeading } from '../../controls/step-heading';
 import { useShowOnDrawing } from '../../layout/overlay';
 import { useRecord, useTraceContext } from '../../store/trace-session';
@@ -28,6 +28,7 @@ export function PowerCircuit({ circuit, at, of }: PowerCircuitProps) {
   const answer = (outcome: Seen) => void record({ type: 'circuit.powered', circuit, outcome });
   // Lamps do not light through a series lamp or a meter: this check needs a proper supply.
   const lampsLight = feed.kind !== 'seriesLamp' && feed.kind !== 'ohmmeter';
+  const supply: Feed = lampsLight ? feed : { kind: 'tester', atHand: feed.atHand };
   return (
     <Panel>
       <PanelBody>
@@ -40,18 +41,12 @@ export function PowerCircuit({ circuit, at, of }: PowerCircuitProps) {
           {t('caution.noHolding.text')} {t('caution.noBypass.text')}
         </Callout>
       </PanelBody>
-      <PanelAnswers>
-        {lampsLight ? (
-          <PowerOn feed={feed} circuit={circuit} />
-        ) : (
-          <PowerOn feed={{ kind: 'tester', atHand: feed.atHand }} circuit={circuit} />
-        )}
-        <ReadingAnswers
-          feed={lampsLight ? feed : { kind: 'tester', atHand: feed.atHand }}
-          about={{ overload: t('prove.overloadAbout') }}
-          onAnswer={answer}
-        />
-      </PanelAnswers>
+      <ReadingAnswers
+        ask={<PowerOn feed={supply} circuit={circuit} />}
+        feed={supply}
+        about={{ overload: t('prove.overloadAbout') }}
+        onAnswer={answer}
+      />
     </Panel>
   );
 }

@@ -3,7 +3,7 @@ import type { Seen } from '@lampwright/trace';
 import { useMemo, useState } from 'react';
 import { useAnnounce } from '../../controls/announcer';
 import { FieldButton } from '../../controls/field-button';
-import { Eyebrow, Panel, PanelAnswers, PanelBody, Row, Where } from '../../controls/panel';
+import { Eyebrow, Panel, PanelBody, Row, Where } from '../../controls/panel';
 import { StepHeading } from '../../controls/step-heading';
 import { useShowOnDrawing } from '../../layout/overlay';
 import { useRecord, useTraceContext } from '../../store/trace-session';
@@ -54,7 +54,9 @@ export function PowerUpScreen({ next, go, pick }: PowerUpScreenProps) {
       ...readAmps(amps),
       advised: next.advised.open,
     });
-    if (done) announce(t('narrow.recorded', { outcome: outcomeWords(outcome, feed, t) }));
+    if (!done) return;
+    setAmps('');
+    announce(t('narrow.recorded', { outcome: outcomeWords(outcome, feed, t) }));
   };
   const title =
     next.toOpen.length > 0
@@ -78,17 +80,20 @@ export function PowerUpScreen({ next, go, pick }: PowerUpScreenProps) {
         <Reason next={next} />
         <AmpsField circuit={circuit} open={next.open} value={amps} onChange={setAmps} />
       </PanelBody>
-      <PanelAnswers>
-        <PowerOn feed={feed} circuit={circuit} />
-        <ReadingAnswers feed={feed} about={about} onAnswer={(outcome) => void answer(outcome)} />
-        <Row>
+      <ReadingAnswers
+        ask={<PowerOn feed={feed} circuit={circuit} />}
+        feed={feed}
+        about={about}
+        onAnswer={(outcome) => void answer(outcome)}
+      >
+        <Row css={{ '& > *': { flex: '1 1 auto' } }}>
           <FieldButton disabled={next.toOpen.length === 0} onTap={() => go('bar')}>
             {t('narrow.cantReach')}
           </FieldButton>
           <FieldButton onTap={() => go('pick')}>{t('narrow.another')}</FieldButton>
           <FieldButton onTap={() => go('else')}>{t('narrow.more')}</FieldButton>
         </Row>
-      </PanelAnswers>
+      </ReadingAnswers>
     </Panel>
   );
 }
