@@ -38,7 +38,7 @@ export function HarnessDrawing(props: HarnessDrawingProps) {
   const { transform, settled, ...zoom } = useZoom(ref, sheet);
   const { describe } = usePartWords(marks);
 
-  const kept = JSON.stringify([...marks.cut, ...marks.open, ...(pickable ?? [])].sort());
+  const kept = JSON.stringify([...marks.cut, ...marks.open].sort());
   const layout = useMemo(
     () =>
       layoutHarness({
@@ -137,8 +137,9 @@ export function HarnessDrawing(props: HarnessDrawingProps) {
               routes={layout.routes}
               places={marks.places}
               width={layout.symbol * 1.5 * ink}
+              hatch={1 / settled}
             />
-            <OtherParts points={layout.others} ink={ink} />
+            <OtherParts points={layout.others} ink={ink * layout.weight} />
             <Wires
               runs={layout.runs}
               routes={layout.routes}

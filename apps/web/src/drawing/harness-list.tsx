@@ -15,11 +15,8 @@ export function HarnessList({ harness, circuit, marks, onPick, pickable }: Harne
   const { t } = useTranslation('drawing');
   const { states } = usePartWords(marks);
   const roots = useMemo(
-    () =>
-      partTree(
-        shownHarness(harness, circuit, new Set([...marks.cut, ...marks.open, ...(pickable ?? [])])),
-      ),
-    [harness, circuit, marks, pickable],
+    () => partTree(shownHarness(harness, circuit, new Set([...marks.cut, ...marks.open]))),
+    [harness, circuit, marks],
   );
   const wireWords = ({ run, part }: PartNode) => {
     const mark = run && runMark(run, marks.places);

@@ -6,7 +6,7 @@ export function OtherParts({ points, ink }: { points: readonly Point[]; ink: num
   return (
     <g fill={colours.line} aria-hidden>
       {points.map(({ x, y }, at) => (
-        <circle key={at} cx={x} cy={y} r={3 * ink} />
+        <circle key={at} cx={x} cy={y} r={2.6 * ink} />
       ))}
     </g>
   );

@@ -45,11 +45,11 @@ export function Parts({ layout, marks, connected, offered, ink }: Props) {
           >
             {offered.has(part.id) && (
               <circle
-                r={size * 0.86}
-                fill={colours.sheet}
+                r={size * 0.74}
+                fill="none"
                 stroke={colours.ink}
-                strokeWidth={1.5 * ink}
-                strokeDasharray={`${2.5 * ink} ${2.5 * ink}`}
+                strokeWidth={1.25 * ink}
+                strokeDasharray={`${2 * ink} ${2.5 * ink}`}
               />
             )}
             {of.whole === 'found' && <FoundRings size={size} ink={ink} />}

@@ -59,7 +59,7 @@ export function SuspicionBar({ slices }: SuspicionBarProps) {
               x2={`${slice.start * 100}%`}
               y2={HEIGHT}
               stroke={slice.state === 'cleared' ? colours.slateWash : colours.sheet}
-              strokeWidth={1.5}
+              strokeWidth={1}
             />
           )}
         </g>

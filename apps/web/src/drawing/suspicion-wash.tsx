@@ -13,10 +13,12 @@ interface Props {
   routes: ReadonlyMap<string, Point[]>;
   places: DrawingMarks['places'];
   width: number;
+  /** Size of the hatching as a share of its usual one: it keeps its size on the screen. */
+  hatch: number;
 }
 
 /** A hatched ground under everything in question, as a marker pen would leave it along the harness. */
-export function SuspicionWash({ id, parts, runs, positions, routes, places, width }: Props) {
+export function SuspicionWash({ id, parts, runs, positions, routes, places, width, hatch }: Props) {
   const paths = runs
     .filter((run) => runMark(run, places) === 'inQuestion')
     .map((run) => pathOf(routes.get(run.id) ?? [], 6));
@@ -32,7 +34,7 @@ export function SuspicionWash({ id, parts, runs, positions, routes, places, widt
           width={7}
           height={7}
           patternUnits="userSpaceOnUse"
-          patternTransform="rotate(45)"
+          patternTransform={`rotate(45) scale(${hatch})`}
         >
           <rect width={7} height={7} fill={colours.amberWash} />
           <rect width={1.25} height={7} fill={colours.amber} opacity={0.34} />

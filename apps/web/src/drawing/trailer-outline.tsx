@@ -16,7 +16,7 @@ export function TrailerOutline({ frame, bodyType, lengthMetres }: Props) {
   const middle = deck.y + deck.height / 2;
   const outline = outlineOf(deck, bodyType);
   return (
-    <g aria-hidden fill="none" stroke={colours.ink}>
+    <g aria-hidden className="lw-outline" fill="none" stroke={colours.ink}>
       {[frame.front, frame.rear].map((face) => face && <Face key={face.x} box={face} />)}
       <path d={outline.body} fill={colours.sheet} stroke="none" />
       <Axles frame={frame} lengthMetres={lengthMetres} bodyType={bodyType} />

@@ -27,6 +27,10 @@ const COST = {
   sharedWithSibling: -0.6,
 };
 
+/** Beyond this many runs no one follows a single wire, and only the plainest candidates are tried. */
+const MANY = 250;
+const FEW = 2;
+
 export interface RouteInput {
   /** Feed first. */
   runs: readonly Run[];
@@ -66,7 +70,8 @@ export function routeRuns(input: RouteInput): Map<RunId, Point[]> {
     const to = positions.get(run.to);
     if (!from || !to) continue;
     let best: { route: Point[]; cost: number } | null = null;
-    for (const route of routeCandidates(from, to, lanes, symbol)) {
+    const candidates = routeCandidates(from, to, lanes, symbol);
+    for (const route of runs.length > MANY ? candidates.slice(0, FEW) : candidates) {
       if (!route.slice(1, -1).every((bend) => pointInside(bend, bounds))) continue;
       const cost = costOf(route, run, sheet, best?.cost ?? Infinity);
       if (!best || cost < best.cost - 0.01) best = { route, cost };
@@ -98,16 +103,29 @@ function directions(
   };
 }
 
+/** The cost of a route, or more than `enough` as soon as that is certain. */
 function costOf(route: readonly Point[], run: Run, sheet: Sheet, enough: number): number {
-  let cost = (route.length - 2) * COST.bend + entryCost(route, run, sheet);
-  for (const segment of segmentsOf(route)) {
-    const box = segmentBox(segment);
-    cost += box.width + box.height;
-    if (cost + COST.sharedWithSibling * (box.width + box.height) > enough) return cost;
-    for (const id of sheet.symbols.over(growBox(box, 0.5))) {
+  const segments = segmentsOf(route);
+  const lengths = segments.map(({ a, b }) => Math.abs(a.x - b.x) + Math.abs(a.y - b.y));
+  const length = lengths.reduce((sum, piece) => sum + piece, 0);
+  // All of it may turn out to be shared with siblings; what is certain is counted first.
+  let cost = (route.length - 2) * COST.bend + entryCost(route, run, sheet) + length;
+  const most = -COST.sharedWithSibling * length;
+  for (const segment of segments) {
+    if (cost - most > enough) return Infinity;
+    for (const id of sheet.symbols.over(growBox(segmentBox(segment), 0.5))) {
       if (id !== run.from && id !== run.to) cost += COST.overSymbol;
     }
-    for (const other of sheet.drawn.over(growBox(box, 1))) cost += meeting(segment, other, run);
+  }
+  for (const segment of segments) {
+    if (cost - most > enough) return Infinity;
+    let bonus = 0;
+    for (const other of sheet.drawn.over(growBox(segmentBox(segment), 1))) {
+      const change = meeting(segment, other, run);
+      if (change < 0) bonus = Math.min(bonus, change);
+      else cost += change;
+    }
+    cost += bonus;
   }
   return cost;
 }
