@@ -1,4 +1,3 @@
-import { fileURLToPath } from 'node:url';
 import { demoYard } from '@lampwright/demo';
 
 type DemoPerson = (typeof demoYard.people)[number];
@@ -16,6 +15,5 @@ export const people = {
   lead: first('lead'),
 };
 
-/** Where the signed-in browser state of a person is kept for the tests that follow. */
-export const stateOf = (person: DemoPerson) =>
-  fileURLToPath(new URL(`../../../dist/e2e/${person.id}.json`, import.meta.url));
+/** Where the signed-in browser state of a person is kept for the tests that follow; below the workspace. */
+export const stateOf = ({ id }: DemoPerson) => `dist/e2e/${id}.json`;

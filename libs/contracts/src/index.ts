@@ -1,3 +1,4 @@
+export type { DemoDto } from './demo';
 export type {
   AccountDto,
   ChangePasswordRequest,

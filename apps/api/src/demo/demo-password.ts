@@ -1,2 +1,2 @@
-/** The password of every demo account; they hold invented data only, and the console says it at each start. */
+/** The password of every demo account. They hold invented data only; the console and the sign-in screen show it. */
 export const DEMO_PASSWORD = 'thornwick-demo';

@@ -3,9 +3,9 @@ import { ApiOkResponse, ApiOperation, ApiTags } from '@nestjs/swagger';
 import { Public } from '../auth/public.decorator';
 import { ApiProblems } from '../common/problem.dto';
 import { DemoAccountsService } from './demo-accounts.service';
-import { DEMO_PASSWORD } from './demo-password';
-import { DemoDto } from './dto/demo.dto';
+import { DemoDto } from './demo.dto';
 
+/** Lets the sign-in screen offer the people of a demo yard. */
 @ApiTags('demo')
 @Controller('demo')
 export class DemoController {
@@ -13,14 +13,10 @@ export class DemoController {
 
   @Get()
   @Public()
-  @ApiOperation({ summary: 'Who can be tried in a yard of invented data' })
+  @ApiOperation({ summary: 'Who can be tried in a yard of invented data; nobody outside one' })
   @ApiOkResponse({ type: DemoDto })
-  @ApiProblems('internal')
-  async read(): Promise<DemoDto> {
-    const people = await this.accounts.list();
-    return {
-      people: people.map(({ name, email, role }) => ({ name, email, role })),
-      password: people.length > 0 ? DEMO_PASSWORD : '',
-    };
+  @ApiProblems('tooManyRequests', 'internal')
+  read(): Promise<DemoDto> {
+    return this.accounts.read();
   }
 }

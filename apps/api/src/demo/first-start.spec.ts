@@ -3,7 +3,7 @@ import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { demoTraces, demoYard } from '@lampwright/demo';
 import { LEAD, startTestServer } from '../testing/test-server';
-import { DemoAccountsService } from './demo-accounts.service';
+import { DEMO_PASSWORD } from './demo-password';
 import { FirstStartService } from './first-start.service';
 
 it('makes one lead, whose password is shown once, where there is to be no demo yard', async () => {
@@ -12,7 +12,8 @@ it('makes one lead, whose password is shown once, where there is to be no demo y
   const { firstLead } = first.app.get(FirstStartService);
   const signIn = await first.client().post('/api/auth/sign-in').send(firstLead!).expect(200);
   expect(signIn.body.role).toBe('lead');
-  expect(await first.app.get(DemoAccountsService).list()).toEqual([]);
+  const demo = await first.client().get('/api/demo').expect(200);
+  expect(demo.body).toEqual({ people: [], password: '' });
   await first.app.close();
 
   const second = await startTestServer({ demo: 'full', dataDir });
@@ -48,15 +49,14 @@ it('fills an empty database with the demo yard, once, and keeps its secret to it
 it('names the demo accounts that anybody can use, and no others', async () => {
   const server = await startTestServer();
   const lead = await server.signedIn(LEAD);
-  const demo = server.app.get(DemoAccountsService);
-  expect((await demo.list()).map(({ email }) => email).sort()).toEqual(
-    demoYard.people.map(({ email }) => email).sort(),
-  );
+  const demo = async () => (await server.client().get('/api/demo').expect(200)).body;
+  const all = demoYard.people.map(({ name, email, role }) => ({ name, email, role }));
+  expect(await demo()).toEqual({ people: all, password: DEMO_PASSWORD });
   await lead
     .post('/api/auth/account/password')
-    .send({ current: 'thornwick-demo', next: 'not the demo one' })
+    .send({ current: DEMO_PASSWORD, next: 'not the demo one' })
     .expect(204);
   await lead.post(`/api/people/${demoYard.people[1]!.id}/close`).expect(200);
-  expect(await demo.list()).toHaveLength(demoYard.people.length - 2);
+  expect((await demo()).people).toEqual(all.slice(2));
   await server.close();
 });

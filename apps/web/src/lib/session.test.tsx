@@ -34,7 +34,7 @@ describe('the session', () => {
     await screen.findByText('T-118');
     const ended = problem(401, 'sessionEnded');
     server.set('GET trailers', ended);
-    server.set('GET health', ok({ status: 'ok' }));
+    server.set('GET demo', ok({ people: [], password: '' }));
     server.set('POST auth/refresh', ended);
     await router.navigate('/trailers');
     expect(await screen.findByText(/You are signed out on this device/)).toBeVisible();
@@ -47,7 +47,7 @@ describe('the session', () => {
       'GET auth/account': ok(account()),
       'POST auth/sign-out': { status: 204 },
       'GET auth/account/sessions': ok([]),
-      'GET health': ok({ status: 'ok' }),
+      'GET demo': ok({ people: [], password: '' }),
     });
     const { user, router } = renderAt('/');
     await screen.findByText('T-118');

@@ -1,6 +1,6 @@
 import { chakra } from '@chakra-ui/react';
 import { useTranslation } from 'react-i18next';
-import { useHealth } from '../../lib/api/health';
+import { useDemo } from '../../lib/api/demo';
 import { useSession } from '../../lib/session-context';
 import { useAction } from '../../lib/use-action';
 import { useErrorWords } from '../../lib/use-error-words';
@@ -29,12 +29,11 @@ const Role = chakra('span', { base: { fontWeight: 'normal', color: 'fg.muted' } 
 /** One tap signs in where the server says that the yard is a demo. */
 export function DemoPeople() {
   const { t } = useTranslation(['auth', 'common']);
-  const { data } = useHealth();
+  const { data: demo } = useDemo();
   const { signIn } = useSession();
   const { run, busy, error } = useAction(signIn);
   const words = useErrorWords();
-  const demo = data?.demo;
-  if (!demo) return null;
+  if (!demo || demo.people.length === 0) return null;
   return (
     <Box>
       <SectionTitle>{t('demoTitle')}</SectionTitle>

@@ -6,7 +6,7 @@ import { renderAt } from '../../testing/render-at';
 const signedOut = {
   'GET auth/account': problem(401, 'notSignedIn'),
   'POST auth/refresh': problem(401, 'notSignedIn'),
-  'GET health': ok({ status: 'ok' }),
+  'GET demo': ok({ people: [], password: '' }),
   'GET traces': ok(page()),
   'GET trailers': ok(page()),
 };
@@ -65,7 +65,7 @@ describe('signing in', () => {
     };
     const server = fakeServer({
       ...signedOut,
-      'GET health': ok({ status: 'ok', demo }),
+      'GET demo': ok(demo),
       'POST auth/sign-in': ok(account('lead')),
     });
     const { user } = renderAt('/sign-in');

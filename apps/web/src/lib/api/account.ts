@@ -13,7 +13,7 @@ export const updateAccount = (body: UpdateAccountRequest) =>
   api.patch<AccountDto>('auth/account', body);
 
 export const changePassword = (body: ChangePasswordRequest) =>
-  api.post<void>('auth/account/password', body);
+  api.post<undefined>('auth/account/password', body);
 
 export const ownSessionsKey = () => ['account', 'sessions'] as const;
 export const useOwnSessions = () =>

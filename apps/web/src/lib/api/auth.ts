@@ -4,4 +4,4 @@ import { api } from '../client';
 export const signIn = (body: SignInRequest) =>
   api.post<AccountDto>('auth/sign-in', body, { refresh: false });
 
-export const signOut = () => api.post<void>('auth/sign-out', undefined, { refresh: false });
+export const signOut = () => api.post<undefined>('auth/sign-out', undefined, { refresh: false });
