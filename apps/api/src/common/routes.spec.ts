@@ -25,6 +25,7 @@ const TABLE: Record<string, 'public' | string[]> = {
   'POST /api/auth/refresh': 'public',
   'POST /api/auth/sign-out': 'public',
   'GET /api/health': 'public',
+  'GET /api/demo': 'public',
   'GET /api/auth/account': ALL,
   'PATCH /api/auth/account': ALL,
   'POST /api/auth/account/password': ALL,

@@ -1,7 +1,6 @@
 import { Module } from '@nestjs/common';
 import { DemoAccountsService } from './demo-accounts.service';
 import { DemoController } from './demo.controller';
-import { DemoController } from './demo.controller';
 import { FirstStartService } from './first-start.service';
 
 /** What a fresh installation begins with. */

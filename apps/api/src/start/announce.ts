@@ -2,7 +2,6 @@ import type { AddressInfo } from 'node:net';
 import type { NestExpressApplication } from '@nestjs/platform-express';
 import type { Settings } from '../common/settings';
 import { DemoAccountsService } from '../demo/demo-accounts.service';
-import { DEMO_PASSWORD } from '../demo/demo-password';
 import { FirstStartService } from '../demo/first-start.service';
 
 /** Tells the console where the program answers and how to sign in. */
@@ -16,11 +15,11 @@ export async function announce(app: NestExpressApplication, settings: Settings):
       `  ${firstLead.email}  ${firstLead.password}`,
     );
   }
-  const accounts = await app.get(DemoAccountsService).list();
-  if (accounts.length > 0) {
+  const demo = await app.get(DemoAccountsService).read();
+  if (demo.people.length > 0) {
     lines.push(
-      `Demo accounts, password "${DEMO_PASSWORD}":`,
-      ...accounts.map(({ email, name, role }) => `  ${email}  (${name}, ${role})`),
+      `Demo accounts, password "${demo.password}":`,
+      ...demo.people.map(({ email, name, role }) => `  ${email}  (${name}, ${role})`),
     );
   }
   if (settings.https && settings.trustProxy === false) {
