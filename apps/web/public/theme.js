@@ -1,12 +1,15 @@
+/* global localStorage, matchMedia, document */
 /* Sets the theme before anything is painted; `src/theme/theme-choice.ts` writes what this reads. */
 (function () {
-  var choice = null;
-  try {
-    choice = localStorage.getItem('lampwright.theme');
-  } catch (error) {
-    /* Storage can be shut off; light is then what a yard in the sun wants. */
-    choice = null;
+  function chosen() {
+    try {
+      return localStorage.getItem('lampwright.theme');
+    } catch {
+      // Storage can be shut off; light is then what a yard in the sun wants.
+      return null;
+    }
   }
+  var choice = chosen();
   var dark =
     choice === 'dark' ||
     (choice === 'system' && matchMedia('(prefers-color-scheme: dark)').matches);

@@ -1,4 +1,4 @@
-import { screen } from '@testing-library/react';
+import { screen, waitFor } from '@testing-library/react';
 import { fakeServer, ok } from '../testing/fake-server';
 import { account, page } from '../testing/fixtures';
 import { renderAt } from '../testing/render-at';
@@ -18,7 +18,8 @@ describe('the frame', () => {
     const first = await screen.findByRole('heading', { level: 1, name: 'Yard' });
     expect(first).not.toHaveFocus();
     await user.click(screen.getByRole('link', { name: 'Trailers' }));
-    expect(await screen.findByRole('heading', { level: 1, name: 'Trailers' })).toHaveFocus();
+    const next = await screen.findByRole('heading', { level: 1, name: 'Trailers' });
+    await waitFor(() => expect(next).toHaveFocus());
     expect(document.title).toBe('Trailers · Lampwright');
     expect(screen.getByRole('link', { name: 'Trailers' })).toHaveAttribute('aria-current', 'page');
   });

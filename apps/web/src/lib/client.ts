@@ -82,11 +82,11 @@ async function send<T>({ method, path, body, query }: Call): Promise<T> {
   return (text === '' ? undefined : JSON.parse(text)) as T;
 }
 
-let refreshing: Promise<void> | null = null;
+let refreshing: Promise<unknown> | null = null;
 
 /** One refresh serves every request that met the same stale session. */
-function refreshOnce(): Promise<void> {
-  refreshing ??= send<void>({ method: 'post', path: 'auth/refresh' }).finally(() => {
+function refreshOnce(): Promise<unknown> {
+  refreshing ??= send<unknown>({ method: 'post', path: 'auth/refresh' }).finally(() => {
     refreshing = null;
   });
   return refreshing;
@@ -120,5 +120,5 @@ export const api = {
   post: <T>(path: string, body?: unknown, options: Pick<Call, 'refresh'> = {}) =>
     call<T>({ method: 'post', path, body, ...options }),
   patch: <T>(path: string, body: unknown) => call<T>({ method: 'patch', path, body }),
-  delete: <T = void>(path: string) => call<T>({ method: 'delete', path }),
+  delete: <T = undefined>(path: string) => call<T>({ method: 'delete', path }),
 };

@@ -3,7 +3,7 @@ import { malformedPlans } from '@lampwright/harness/testing';
 import i18n from '../i18n/i18n';
 import { faultSentence } from './use-fault-words';
 
-const t = i18n.getFixedT('en', ['errors', 'faults']);
+const t = i18n.getFixedT('en', ['errors', 'faults'] as const);
 
 const cases = malformedPlans.flatMap(({ name, faults }) =>
   faults.map((fault): [string, HarnessFault] => [`${name}: ${fault.code}`, fault]),

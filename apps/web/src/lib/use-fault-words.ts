@@ -3,7 +3,7 @@ import type { TFunction } from 'i18next';
 import { useCallback } from 'react';
 import { useTranslation } from 'react-i18next';
 
-type Words = TFunction<['errors', 'faults']>;
+type Words = TFunction<readonly ['errors', 'faults']>;
 
 const TYPES = ['array', 'object', 'string', 'number', 'boolean', 'null'] as const;
 
@@ -38,6 +38,6 @@ export function faultSentence(t: Words, fault: HarnessFault): string {
 }
 
 export function useFaultWords(): (fault: HarnessFault) => string {
-  const { t } = useTranslation(['errors', 'faults']);
+  const { t } = useTranslation(['errors', 'faults'] as const);
   return useCallback((fault: HarnessFault) => faultSentence(t, fault), [t]);
 }

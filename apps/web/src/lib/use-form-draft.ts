@@ -1,4 +1,4 @@
-import { useEffect, useState } from 'react';
+import { useCallback, useEffect, useState } from 'react';
 import type { DefaultValues, FieldValues, UseFormReturn } from 'react-hook-form';
 import { useDraft } from './use-draft';
 
@@ -20,10 +20,14 @@ export function useFormDraft<T extends FieldValues>(
   form: UseFormReturn<T>,
   secret: readonly (keyof T & string)[] = [],
 ): FormDraft {
-  const { kept, ready, safe, save, clear } = useDraft(name, (value) =>
-    isStrings(value) ? value : null,
-  );
-  const [restored, setRestored] = useState(false);
+  const {
+    kept,
+    ready,
+    safe,
+    save,
+    clear: forget,
+  } = useDraft(name, (value) => (isStrings(value) ? value : null));
+  const [cleared, setCleared] = useState(false);
   const { reset, watch, getValues } = form;
 
   useEffect(() => {
@@ -32,7 +36,6 @@ export function useFormDraft<T extends FieldValues>(
     reset({ ...getValues(), ...Object.fromEntries(known) } as DefaultValues<T>, {
       keepDefaultValues: true,
     });
-    setRestored(true);
   }, [ready, kept, reset, getValues]);
 
   useEffect(() => {
@@ -43,5 +46,9 @@ export function useFormDraft<T extends FieldValues>(
     return () => watching.unsubscribe();
   }, [watch, save, secret]);
 
-  return { restored, safe, clear };
+  const clear = useCallback(() => {
+    forget();
+    setCleared(true);
+  }, [forget]);
+  return { restored: kept !== null && !cleared, safe, clear };
 }

@@ -5,8 +5,8 @@ export const FilterBar = chakra('div', {
   base: {
     display: 'grid',
     gap: 'touch',
-    gridTemplateColumns: 'repeat(auto-fill, minmax(min(100%, 10.5rem), 1fr))',
+    gridTemplateColumns: 'repeat(auto-fill, minmax(min(100%, 9rem), 1fr))',
     alignItems: 'end',
-    '& > :first-of-type': { gridColumn: { md: 'span 2' } },
+    '& > :first-of-type': { gridColumn: { base: '1 / -1', md: 'span 2' } },
   },
 });

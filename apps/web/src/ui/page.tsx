@@ -32,7 +32,7 @@ const Head = chakra('header', {
   base: {
     display: 'flex',
     flexWrap: 'wrap',
-    alignItems: 'flex-end',
+    alignItems: 'center',
     justifyContent: 'space-between',
     gap: '4',
     columnGap: '6',

@@ -43,6 +43,7 @@ export const tableRecipe = defineRecipe({
     },
     '& td:first-of-type, & th:first-of-type': { pl: '0' },
     '& td:last-of-type, & th:last-of-type': { pr: '0' },
+    '& [data-nowrap=true]': { whiteSpace: 'nowrap' },
     '& [data-align=end]': { textAlign: 'right' },
     '& td a': {
       fontWeight: 'semibold',

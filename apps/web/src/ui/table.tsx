@@ -12,6 +12,8 @@ export interface Column<Row> {
   header: string;
   cell: (row: Row) => ReactNode;
   align?: 'start' | 'end';
+  /** Keeps a date or a name on one line. */
+  nowrap?: boolean;
   /** The field that the server sorts by. */
   sort?: string;
 }
@@ -92,6 +94,7 @@ export function Table<Row>({ caption, columns, rows, keyOf, sort = '', onSort }:
                   key={column.key}
                   role="cell"
                   data-align={column.align}
+                  data-nowrap={column.nowrap}
                   data-label={column.header}
                 >
                   {column.cell(row)}

@@ -15,7 +15,7 @@ import { Button, Callout, ErrorState, LinkButton, Loading } from '../../ui';
 const Foot = chakra('div', {
   base: {
     position: 'sticky',
-    bottom: { base: '84px', md: '0' },
+    bottom: { base: 'calc(69px + env(safe-area-inset-bottom))', md: '0' },
     bg: 'bg.canvas',
     borderTop: '1px solid',
     borderColor: 'line',

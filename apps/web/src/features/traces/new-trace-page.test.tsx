@@ -1,4 +1,4 @@
-import { screen } from '@testing-library/react';
+import { screen, waitFor } from '@testing-library/react';
 import { fakeServer, ok } from '../../testing/fake-server';
 import { account, page, trace, trailer } from '../../testing/fixtures';
 import { renderAt } from '../../testing/render-at';
@@ -28,7 +28,7 @@ describe('starting a trace', () => {
 
     server.set('POST traces', ok({ ...trace(), id: 'tr1' }));
     await user.click(screen.getByRole('button', { name: 'Start on unit T-118' }));
-    await vi.waitFor(() => expect(where()).toBe('/traces/tr1'));
+    await waitFor(() => expect(where()).toBe('/traces/tr1'));
     const [first, second] = server.sent('POST traces').map(({ body }) => body);
     expect(first).toEqual({ id: expect.stringMatching(/^[0-9a-f-]{36}$/), trailerId: 't1' });
     expect(second).toEqual(first);

@@ -58,6 +58,7 @@ export function TraceTable({ traces, sort, onSort }: TraceTableProps) {
         key: 'opened',
         header: t('opened'),
         sort: 'openedAt',
+        nowrap: true,
         cell: ({ openedAt }) => formatDate(openedAt),
       },
     ],

@@ -44,8 +44,10 @@ describe('the trailer form', () => {
     const { user } = renderAt('/trailers/new');
     await user.type(await screen.findByLabelText('Length in feet'), '480');
     await user.click(screen.getByRole('button', { name: 'Add the trailer' }));
-    expect(screen.getByLabelText('Length in feet')).toHaveAccessibleDescription(
-      /between 3 ft 3 in and 131 ft 3 in/,
+    await waitFor(() =>
+      expect(screen.getByLabelText('Length in feet')).toHaveAccessibleDescription(
+        /between 3 ft 3 in and 131 ft 3 in/,
+      ),
     );
     expect(server.sent('POST trailers')).toHaveLength(0);
   });

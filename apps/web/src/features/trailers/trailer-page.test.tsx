@@ -16,7 +16,7 @@ describe('a trailer', () => {
     renderAt('/trailers/t1');
     expect(await screen.findByRole('heading', { level: 1, name: 'Unit T-118' })).toBeVisible();
     expect(document.title).toBe('Unit T-118 · Lampwright');
-    expect(screen.getByText('48 ft')).toBeVisible();
+    expect(screen.getByText('48 ft', { selector: 'dd' })).toBeVisible();
     expect(await screen.findByRole('link', { name: 'Tee CU-2' })).toHaveAttribute(
       'href',
       '/traces/tr1',
