@@ -1,3 +1,4 @@
+import { bitsPerSecond } from './capacity';
 import type { Cells } from './cells';
 import { entropyBits, huffmanLength } from './huffman';
 
@@ -29,21 +30,8 @@ function nearestWalk({ walk, size, blocking, blockingWalk }: Cells): number {
 function readingSeconds({ weight, overloadSeconds }: Cells, each: number): number {
   const likeliest = weight.reduce((most, share) => Math.max(most, share), 0);
   const counted = each * huffmanLength(weight) + overloadSeconds * (1 - likeliest);
-  if (overloadSeconds === 0 || each === 0) return counted;
+  if (overloadSeconds === 0) return counted;
   return Math.max(counted, entropyBits(weight) / bitsPerSecond(each, each + overloadSeconds));
-}
-
-/** The rate at which two letters of unequal seconds can carry bits, by bisection. */
-export function bitsPerSecond(short: number, long: number): number {
-  let low = 0;
-  let high = 1 / short;
-  for (let round = 0; round < 60; round += 1) {
-    const middle = (low + high) / 2;
-    if (2 ** (-middle * short) + 2 ** (-middle * long) > 1) low = middle;
-    else high = middle;
-  }
-  // The upper end, so that the bound stays one.
-  return high;
 }
 
 /**

@@ -1,4 +1,5 @@
 import type { SeparablePoint } from '@lampwright/harness';
+import { bitsPerSecond } from './capacity';
 import { pointsOf, walkSeconds } from './costs';
 import type { Question } from './types';
 import { worthKeeping } from './worthKeeping';
@@ -25,6 +26,8 @@ export interface Cells {
   section: Int32Array;
   powerSeconds: number;
   overloadSeconds: number;
+  /** See `bitsPerSecond`; walks not counted. */
+  bitsPerSecond: number;
   /** Close seconds of everything that is open at the start. */
   closing: number;
   /** Walk to the farthest open point of other circuits. */
@@ -100,6 +103,7 @@ export function cellsOf(question: Question): Cells {
     section,
     powerSeconds: timing.powerSeconds,
     overloadSeconds: timing.overloadSeconds,
+    bitsPerSecond: bitsPerSecond(timing.powerSeconds, timing.powerSeconds + timing.overloadSeconds),
     closing: [...pointsOf(tree).filter(({ partId }) => open.has(partId)), ...elsewhere].reduce(
       (total, { closeSeconds }) => total + closeSeconds,
       0,

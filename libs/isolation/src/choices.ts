@@ -1,3 +1,4 @@
+import { basesOf } from './bases';
 import type { Situation, Workbench } from './situation';
 
 /** A set of points to have open, with what a glance says of it. */
@@ -7,59 +8,56 @@ export interface Choice {
   rate: number;
 }
 
-/**
- * The choices worth a look in a situation. Each starts from a part of what is open already and opens up to `mostNew`
- * more points, one after the other, always the one that brings the highest rate. With `everyFirst` each point gets its
- * turn as the first one opened; otherwise only the best does. O(cells x bases x mostNew).
- */
-export function choicesOf(
+/** So many of the best first points are looked at together with further ones. */
+const GROWN = 8;
+
+/** The choice that the greedy play makes: points are added as long as that raises the rate. O(cells x mostNew). */
+export function greedyChoice(
   bench: Workbench,
   situation: Situation,
   mostNew: number,
-  everyFirst: boolean,
-): Choice[] {
-  const found: Choice[] = [];
+): Choice | undefined {
+  let best: Choice | undefined;
+  const offer = (choice: Choice | undefined) => {
+    if (!choice || (best && choice.rate <= best.rate)) return false;
+    best = choice;
+    return true;
+  };
   for (const base of basesOf(bench, situation)) {
-    const start = rateOf(bench, situation, base);
-    if (start > 0) found.push({ open: base, rate: start });
-    const firsts = extensions(bench, situation, base);
-    if (everyFirst) found.push(...firsts);
-    let best = bestOf(firsts);
-    for (let more = 1; best && more <= mostNew; more += 1) {
-      if (!everyFirst || more > 1) found.push(best);
-      const next = more < mostNew ? bestOf(extensions(bench, situation, best.open)) : undefined;
-      best = next && next.rate > best.rate ? next : undefined;
+    const start = { open: base, rate: rateOf(bench, situation, base) };
+    if (start.rate > 0) offer(start);
+    let grown = bestExtension(bench, situation, base);
+    for (let more = 1; offer(grown) && grown && more < mostNew; more += 1) {
+      grown = bestExtension(bench, situation, grown.open);
     }
   }
-  return found;
-}
-
-/** The choice with the highest rate; of equal ones the first. */
-export function bestOf(choices: readonly Choice[]): Choice | undefined {
-  let best: Choice | undefined;
-  for (const choice of choices) if (!best || choice.rate > best.rate) best = choice;
   return best;
 }
 
 /**
- * Which of the open points stay open: none, all but one, only one, the heaviest ones that together are about half, and
- * all: with a short that comes and goes, or after a change of circuit, what is open now may still tell something.
- * O(open points) sets.
+ * The choices worth a look: what is open already or a part of it, alone and with each further point, and the best of
+ * these with up to `mostNew` further points, whether or not that raises the rate. O(bases x cells x mostNew).
  */
-function basesOf(bench: Workbench, situation: Situation): number[][] {
-  const { open } = situation;
-  if (open.length === 0) return [[]];
-  bench.survey(situation);
-  const byWeight = [...open].sort(
-    (a, b) => (bench.beyond[b] ?? 0) - (bench.beyond[a] ?? 0) || a - b,
-  );
-  const ascending = (some: number[]) => some.sort((a, b) => a - b);
-  const bases = [[], [...open], ...open.map((one) => open.filter((other) => other !== one))];
-  if (open.length > 2) bases.push(...open.map((one) => [one]));
-  for (let kept = 2; kept < open.length - 1; kept += 1) {
-    bases.push(ascending(byWeight.slice(0, kept)));
+export function choicesOf(bench: Workbench, situation: Situation, mostNew: number): Choice[] {
+  const found: Choice[] = [];
+  for (const base of basesOf(bench, situation)) {
+    const start = rateOf(bench, situation, base);
+    if (start > 0) found.push({ open: base, rate: start });
+    const firsts: Choice[] = [];
+    visitExtensions(bench, situation, base, (v, rate) => {
+      firsts.push({ open: withPoint(base, v), rate });
+    });
+    firsts.sort((a, b) => b.rate - a.rate);
+    found.push(...firsts);
+    for (const first of firsts.slice(0, GROWN)) {
+      let grown: Choice | undefined = first;
+      for (let more = 2; grown && more <= mostNew; more += 1) {
+        grown = bestExtension(bench, situation, grown.open);
+        if (grown) found.push(grown);
+      }
+    }
   }
-  return bases;
+  return found;
 }
 
 function rateOf(bench: Workbench, situation: Situation, open: readonly number[]): number {
@@ -69,14 +67,34 @@ function rateOf(bench: Workbench, situation: Situation, open: readonly number[])
   return bits(share) / (step.seconds + share * bench.cells.overloadSeconds);
 }
 
-/** Every way to open one more point on top of `base`. O(cells). */
-function extensions(bench: Workbench, situation: Situation, base: readonly number[]): Choice[] {
-  const { hands, walk, overloadSeconds, powerSeconds } = bench.cells;
+function bestExtension(
+  bench: Workbench,
+  situation: Situation,
+  base: readonly number[],
+): Choice | undefined {
+  let best = -1;
+  let highest = 0;
+  visitExtensions(bench, situation, base, (v, rate) => {
+    if (rate <= highest) return;
+    highest = rate;
+    best = v;
+  });
+  return best < 0 ? undefined : { open: withPoint(base, best), rate: highest };
+}
+
+/** Visits every point that can be opened on top of `base`, with the rate of having both open. O(cells). */
+function visitExtensions(
+  bench: Workbench,
+  situation: Situation,
+  base: readonly number[],
+  visit: (v: number, rate: number) => void,
+): void {
+  const { hands, walk, weight, overloadSeconds, powerSeconds } = bench.cells;
   const energised = bench.surveyEnergised(situation, base);
   let lit = 0;
   let count = 0;
   for (const v of energised) {
-    const share = bench.cells.weight[v] ?? 0;
+    const share = weight[v] ?? 0;
     lit += share;
     if (share > 0) count += 1;
   }
@@ -90,16 +108,19 @@ function extensions(bench: Workbench, situation: Situation, base: readonly numbe
   for (const v of situation.open) {
     if (!base.includes(v)) farthest = Math.max(farthest, walk[v] ?? 0);
   }
-  const choices: Choice[] = [];
   for (const v of energised) {
     const beyond = bench.countBeyond[v] ?? 0;
     if (v === 0 || beyond === 0 || beyond === count || situation.open.includes(v)) continue;
     const share = (lit - (bench.beyond[v] ?? 0)) / situation.weight;
-    const cost =
-      seconds + (hands[v] ?? 0) + Math.max(farthest, walk[v] ?? 0) + share * overloadSeconds;
-    choices.push({ open: [...base, v].sort((a, b) => a - b), rate: bits(share) / cost });
+    const effort = seconds + (hands[v] ?? 0) + Math.max(farthest, walk[v] ?? 0);
+    visit(v, bits(share) / (effort + share * overloadSeconds));
   }
-  return choices;
+}
+
+/** An ascending list with one more. */
+function withPoint(base: readonly number[], v: number): number[] {
+  const at = base.findIndex((other) => other > v);
+  return at < 0 ? [...base, v] : [...base.slice(0, at), v, ...base.slice(at)];
 }
 
 /** Entropy of a reading that is an overload with this probability, in bits. */

@@ -3,12 +3,13 @@ import { cellsOf } from './cells';
 import { closingSeconds } from './costs';
 import { lookAhead } from './lookAhead';
 import { openingSituation, Workbench } from './situation';
+import { Steps } from './steps';
 import { tellsMore } from './tellsMore';
 import type { Plan, Planner, Question } from './types';
 
 /** How much the planner may think. Steps are power-ups tried in thought, so that answers do not depend on a clock. */
 export interface PlannerOptions {
-  /** At most about so many steps for one question. Default 5000, some tens of milliseconds at 60 sections. */
+  /** At most about so many steps for one question. Default 40000, some tens of milliseconds at 60 sections. */
   steps?: number;
 }
 
@@ -18,7 +19,7 @@ export interface PlannerOptions {
  * @throws RangeError from `plan` when no probability is above 0: ask `Belief.contradicted` first.
  */
 export function createPlanner(options: PlannerOptions = {}): Planner {
-  return { plan: (question) => planWith(question, options.steps ?? 5000) };
+  return { plan: (question) => planWith(question, options.steps ?? 40_000) };
 }
 
 const planner = createPlanner();
@@ -42,8 +43,8 @@ function planWith(question: Question, steps: number): Plan {
   }
   const bench = new Workbench(cells);
   const found =
-    lookAhead(bench, situation, steps, tellsMore(question, cells)) ??
-    lookAhead(bench, situation, steps, () => true);
+    lookAhead(bench, situation, new Steps(steps), tellsMore(question, cells)) ??
+    lookAhead(bench, situation, new Steps(steps), () => true);
   if (!found) throw new Error('sections in question that no point parts');
   return { kind: 'powerUp', advice: adviceOf(question, cells, found) };
 }

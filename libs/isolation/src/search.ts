@@ -1,6 +1,8 @@
 import { choicesOf } from './choices';
+import { exactLength } from './exact/exactFinding';
 import type { Length, Policy } from './playOut';
 import { finalWalk, type Situation, type Step, type Workbench } from './situation';
+import { subCells } from './subCells';
 import type { Steps } from './steps';
 
 /** How widely a search looks. */
@@ -9,6 +11,8 @@ export interface Breadth {
   mostNew: number;
   /** How many choices are looked into, by the number of cells in question. */
   width: (count: number) => number;
+  /** From so many cells in question downwards the best play is searched out. */
+  exactFrom: number;
 }
 
 /** A step and how long the best play found behind it is. */
@@ -41,7 +45,7 @@ export class Search {
   /** The best step found among the allowed ones, its play counted to the end, closing included. */
   best(situation: Situation, allows: Allows = () => true): Played | null {
     let best: Played | null = null;
-    for (const step of this.ranked(situation, this.breadth.width(situation.count), allows)) {
+    for (const { step } of this.ranked(situation, this.breadth.width(situation.count), allows)) {
       const length = this.after(situation, step, (next) => this.value(next));
       if (!best || length.weighted < best.length.weighted) best = { step, length };
     }
@@ -51,7 +55,7 @@ export class Search {
   /** The most promising steps, each with the length of the best play found behind it; at most `most`, best first. */
   candidates(situation: Situation, most: number, allows: Allows): Played[] {
     return this.ranked(situation, most, allows)
-      .map((step) => ({
+      .map(({ step }) => ({
         step,
         length: this.after(situation, step, (next) => this.value(next)),
       }))
@@ -60,6 +64,7 @@ export class Search {
 
   private value(situation: Situation): Length {
     if (situation.count <= 1) return this.end(situation);
+    if (situation.count <= this.breadth.exactFrom) return this.tail(situation);
     const key = keyOf(situation);
     const known = this.values.get(key);
     if (known) return known;
@@ -68,7 +73,7 @@ export class Search {
     return length;
   }
 
-  private ranked(situation: Situation, most: number, allows: Allows): Step[] {
+  private ranked(situation: Situation, most: number, allows: Allows): Played[] {
     const steps = this.stepsOf(situation)
       .filter(allows)
       .map((step) => ({
@@ -76,13 +81,13 @@ export class Search {
         length: this.after(situation, step, (next) => this.basicLength(next)),
       }));
     steps.sort((a, b) => a.length.weighted - b.length.weighted);
-    return steps.slice(0, most).map(({ step }) => step);
+    return steps.slice(0, most);
   }
 
   private stepsOf(situation: Situation): Step[] {
     const steps: Step[] = [];
     const seen = new Set<string>();
-    for (const { open } of choicesOf(this.bench, situation, this.breadth.mostNew, true)) {
+    for (const { open } of choicesOf(this.bench, situation, this.breadth.mostNew)) {
       const key = open.join();
       if (seen.has(key)) continue;
       seen.add(key);
@@ -94,6 +99,17 @@ export class Search {
     }
     this.steps.spend(steps.length);
     return steps;
+  }
+
+  /** The best play of a situation with so few cells that it is soon known. */
+  private tail(situation: Situation): Length {
+    const key = keyOf(situation);
+    const known = this.values.get(key);
+    if (known) return known;
+    const length = exactLength(subCells(this.bench.cells, situation), this.steps);
+    if (!length) throw new Error('two cells in question that no point parts');
+    this.values.set(key, length);
+    return length;
   }
 
   private end(situation: Situation): Length {
@@ -127,6 +143,7 @@ export class Search {
 
   private played(situation: Situation, policy: Policy, known: Map<string, Length>): Length {
     if (situation.count <= 1) return this.end(situation);
+    if (situation.count <= this.breadth.exactFrom) return this.tail(situation);
     const key = keyOf(situation);
     const before = known.get(key);
     if (before) return before;

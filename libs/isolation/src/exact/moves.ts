@@ -7,6 +7,8 @@ export interface Move {
   /** Useful points open when power goes on. */
   open: number;
   energised: number;
+  /** Seconds to the reading, an overload not counted. */
+  seconds: number;
   /** Weighted seconds of the power-up, overloads included. */
   cost: number;
   /** Rank of the walk taken. */
@@ -75,16 +77,12 @@ export class MoveList {
     const { set, spent } = this.state;
     if (energised === set || this.opensInVain(open, energised)) return;
     const { cells, walkSeconds } = this.book.masks;
-    const fixed =
-      this.facts.weight * (cells.powerSeconds + hands) +
-      this.book.of(energised).weight * cells.overloadSeconds;
-    const add = (rank: number) =>
-      this.found.push({
-        open,
-        energised,
-        walk: rank,
-        cost: fixed + this.facts.weight * (walkSeconds[rank] ?? 0),
-      });
+    const overloads = this.book.of(energised).weight * cells.overloadSeconds;
+    const add = (rank: number) => {
+      const seconds = cells.powerSeconds + hands + (walkSeconds[rank] ?? 0);
+      const cost = this.facts.weight * seconds + overloads;
+      this.found.push({ open, energised, walk: rank, seconds, cost });
+    };
     add(walk);
     if (spent > walk) add(spent);
   }

@@ -1,4 +1,3 @@
-import { bitsPerSecond } from '../bounds';
 import { entropyBits, huffmanLength } from '../huffman';
 import type { Steps } from '../steps';
 import { bitsOf, type Masks } from './masks';
@@ -23,18 +22,10 @@ export interface SetFacts {
 export class SetBook {
   private readonly facts = new Map<number, SetFacts>();
   private readonly openings = new Map<number, number>();
-  private readonly rate: number;
-
   constructor(
     readonly masks: Masks,
     private readonly steps: Steps,
-  ) {
-    const { powerSeconds, overloadSeconds } = masks.cells;
-    this.rate =
-      overloadSeconds > 0 && powerSeconds > 0
-        ? bitsPerSecond(powerSeconds, powerSeconds + overloadSeconds)
-        : 0;
-  }
+  ) {}
 
   of(set: number): SetFacts {
     const known = this.facts.get(set);
@@ -113,10 +104,10 @@ export class SetBook {
 
   /** See `lowerBoundSeconds`: Huffman's number of readings, or the capacity of letters of unequal length. */
   private readingSeconds(shares: readonly number[], weight: number, count: number): number {
-    const { powerSeconds, overloadSeconds } = this.masks.cells;
+    const { powerSeconds, overloadSeconds, bitsPerSecond } = this.masks.cells;
     const counted = powerSeconds * count + overloadSeconds * (weight - Math.max(0, ...shares));
-    if (this.rate === 0) return counted;
-    return Math.max(counted, (weight * entropyBits(shares)) / this.rate);
+    if (overloadSeconds === 0) return counted;
+    return Math.max(counted, (weight * entropyBits(shares)) / bitsPerSecond);
   }
 
   /** Points between neighbours are walked to twice, once to open and once to close. */
