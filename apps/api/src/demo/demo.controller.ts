@@ -3,7 +3,7 @@ import { ApiOkResponse, ApiOperation, ApiTags } from '@nestjs/swagger';
 import { Public } from '../auth/public.decorator';
 import { ApiProblems } from '../common/problem.dto';
 import { DemoAccountsService } from './demo-accounts.service';
-import { DemoDto } from './demo.dto';
+import { DemoDto } from './dto/demo.dto';
 
 /** Lets the sign-in screen offer the people of a demo yard. */
 @ApiTags('demo')

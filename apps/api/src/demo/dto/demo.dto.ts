@@ -1,10 +1,11 @@
 import { ApiProperty, PickType } from '@nestjs/swagger';
-import type { DemoDto as Demo } from '@lampwright/contracts';
+import type { DemoDto as DemoShape } from '@lampwright/contracts';
 import { PersonDto } from '../../people/dto/person.dto';
 
 export class DemoPersonDto extends PickType(PersonDto, ['name', 'email', 'role'] as const) {}
 
-export class DemoDto implements Demo {
+/** Who can be tried in a demo yard. */
+export class DemoDto implements DemoShape {
   @ApiProperty({ type: [DemoPersonDto] })
   people: DemoPersonDto[];
 
