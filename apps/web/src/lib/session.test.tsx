@@ -30,13 +30,13 @@ describe('the session', () => {
 
   it('sends to the sign-in when the server ends the session, and says that nothing is lost', async () => {
     const server = fakeServer({ ...yard, 'GET auth/account': ok(account()) });
-    const { router } = renderAt('/');
+    const { user } = renderAt('/');
     await screen.findByText('T-118');
     const ended = problem(401, 'sessionEnded');
     server.set('GET trailers', ended);
     server.set('GET demo', ok({ people: [], password: '' }));
     server.set('POST auth/refresh', ended);
-    await router.navigate('/trailers');
+    await user.click(screen.getByRole('link', { name: 'Trailers' }));
     expect(await screen.findByText(/You are signed out on this device/)).toBeVisible();
     await expect(keptAccount.read()).resolves.toBeNull();
   });
@@ -49,9 +49,9 @@ describe('the session', () => {
       'GET auth/account/sessions': ok([]),
       'GET demo': ok({ people: [], password: '' }),
     });
-    const { user, router } = renderAt('/');
+    const { user } = renderAt('/');
     await screen.findByText('T-118');
-    await router.navigate('/account');
+    await user.click(screen.getByRole('link', { name: 'Account' }));
     await user.click(await screen.findByRole('button', { name: 'Sign out here' }));
 
     const other = account('technician', { id: 'p2', name: 'Ida Holt' });
@@ -60,7 +60,8 @@ describe('the session', () => {
     await user.type(await screen.findByLabelText('E-mail'), 'ida@yard.example');
     await user.type(screen.getByLabelText('Password'), 'a long password');
     await user.click(screen.getByRole('button', { name: 'Sign in' }));
-    await router.navigate('/');
+    await screen.findByRole('heading', { level: 1, name: 'Account' });
+    await user.click(screen.getByRole('link', { name: 'Yard' }));
     expect(await screen.findByText('Your role does not allow this. Ask a lead.')).toBeVisible();
     expect(screen.queryByText('T-118')).not.toBeInTheDocument();
   });

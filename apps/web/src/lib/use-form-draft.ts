@@ -14,7 +14,10 @@ export interface FormDraft {
   clear: () => void;
 }
 
-/** Keeps what is typed into a form under `name` and fills it in again, but never the fields named in `secret`. */
+/**
+ * Keeps what is typed into a form under `name` and fills it in again, but never the fields named in `secret`. Only what
+ * differs from the form's own values is kept: the rest may be newer on the server by then.
+ */
 export function useFormDraft<T extends FieldValues>(
   name: string,
   form: UseFormReturn<T>,
@@ -29,6 +32,7 @@ export function useFormDraft<T extends FieldValues>(
   } = useDraft(name, (value) => (isStrings(value) ? value : null));
   const [cleared, setCleared] = useState(false);
   const { reset, watch, getValues } = form;
+  const { defaultValues } = form.formState;
 
   useEffect(() => {
     if (!ready || !kept) return;
@@ -41,10 +45,18 @@ export function useFormDraft<T extends FieldValues>(
   useEffect(() => {
     const watching = watch((values, { type }) => {
       if (type !== 'change') return;
-      save(Object.fromEntries(Object.entries(values).filter(([field]) => !secret.includes(field))));
+      save(
+        Object.fromEntries(
+          Object.entries(values).filter(
+            ([field, value]) =>
+              !secret.includes(field) &&
+              JSON.stringify(value) !== JSON.stringify(defaultValues?.[field]),
+          ),
+        ),
+      );
     });
     return () => watching.unsubscribe();
-  }, [watch, save, secret]);
+  }, [watch, save, secret, defaultValues]);
 
   const clear = useCallback(() => {
     forget();

@@ -92,7 +92,7 @@ describe('the trailer form', () => {
 
     const second = renderAt('/trailers/new');
     expect(await screen.findByText(/What you had typed is still here/)).toBeVisible();
-    expect(screen.getByLabelText('Unit')).toHaveValue('N-5');
+    await waitFor(() => expect(screen.getByLabelText('Unit')).toHaveValue('N-5'));
     expect(screen.getByLabelText('Fleet')).toHaveValue('Saltmarsh');
     expect(screen.getByRole('checkbox', { name: 'Solar panel' })).toBeChecked();
 
@@ -114,7 +114,8 @@ describe('the trailer form', () => {
     server.set('GET trailers/t1', ok(trailer({ fleet: 'Brackenloft', version: 4 })));
     await user.click(await screen.findByRole('button', { name: 'Fetch the newest version' }));
     expect(await screen.findByText(/What you had typed is still here/)).toBeVisible();
-    expect(screen.getByLabelText(/^Plate/)).toHaveValue('QF 118');
+    await waitFor(() => expect(screen.getByLabelText(/^Plate/)).toHaveValue('QF 118'));
+    expect(screen.getByLabelText('Fleet')).toHaveValue('Brackenloft');
     server.set('PATCH trailers/t1', ok(trailer({ version: 5 })));
     await user.click(screen.getByRole('button', { name: 'Save' }));
     await waitFor(() =>
