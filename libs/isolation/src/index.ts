@@ -8,7 +8,7 @@ export type { Aftermath, Explanation, KnownFacts, PowerUpFacts } from './explain
 export { firstQuestion, forecast } from './forecast';
 export type { Forecast } from './forecast';
 export { easiestFirstSeconds, halfByCountSeconds } from './habits';
-export { createPlanner, plan } from './planner';
+export { createPlanner, plan, QUICK_STEPS, THOROUGH_STEPS } from './planner';
 export type { PlannerOptions } from './planner';
 export { DEFAULT_TIMING } from './timing';
 export type * from './types';

@@ -7,9 +7,15 @@ import { Steps } from './steps';
 import { tellsMore } from './tellsMore';
 import type { Plan, Planner, Question } from './types';
 
+/** For an answer while the person waits: a few tens of milliseconds at 60 parts. */
+export const QUICK_STEPS = 25_000;
+
+/** For an answer in the background, or for a forecast: about half a second at 60 parts. */
+export const THOROUGH_STEPS = 250_000;
+
 /** How much the planner may think. Steps are power-ups tried in thought, so that answers do not depend on a clock. */
 export interface PlannerOptions {
-  /** At most about so many steps for one question. Default 40000, some tens of milliseconds at 60 sections. */
+  /** Default `QUICK_STEPS`. */
   steps?: number;
 }
 
@@ -19,7 +25,7 @@ export interface PlannerOptions {
  * @throws RangeError from `plan` when no probability is above 0: ask `Belief.contradicted` first.
  */
 export function createPlanner(options: PlannerOptions = {}): Planner {
-  return { plan: (question) => planWith(question, options.steps ?? 40_000) };
+  return { plan: (question) => planWith(question, options.steps ?? QUICK_STEPS) };
 }
 
 const planner = createPlanner();

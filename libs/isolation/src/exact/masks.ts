@@ -20,7 +20,7 @@ export interface Masks {
   sistersBefore: Int32Array;
   /** By point: the rank of its walk. */
   walkRank: Int32Array;
-  /** By rank: the seconds of the walk, ascending. */
+  /** By rank: the seconds of the walk, ascending. A point at the switch has a walk of 0 seconds, but a rank. */
   walkSeconds: number[];
 }
 
@@ -38,13 +38,15 @@ export function masksOf(cells: Cells): Masks {
       beyond[up] = (beyond[up] ?? 0) | (beyond[v] ?? 0);
     }
   }
-  const walkSeconds = [...new Set([0, blockingWalk, spentWalk, ...walk])].sort((a, b) => a - b);
+  const walks = [...new Set([blockingWalk, spentWalk, ...walk.subarray(1)])].sort((a, b) => a - b);
+  // Rank 0 is no walk at all; with power at hand no walk counts.
+  const walkSeconds = walks.some((seconds) => seconds > 0) ? [0, ...walks] : [0];
   return {
     cells,
     everything,
     beyond,
     sistersBefore: sistersBefore(cells),
-    walkRank: Int32Array.from(walk, (seconds) => walkSeconds.indexOf(seconds)),
+    walkRank: Int32Array.from(walk, (seconds) => Math.max(0, walkSeconds.lastIndexOf(seconds))),
     walkSeconds,
   };
 }

@@ -92,11 +92,12 @@ export class MoveList {
     const { set, open: before, spent } = this.state;
     const { weight, nearest, far } = this.facts;
     const { walkSeconds } = this.book.masks;
-    const now = (walkSeconds[walk] ?? 0) - nearest;
-    // What is open then, and what is spent and out of reach, takes one more walk to close.
-    const later = Math.max(this.farthestOf(open), spent > walk ? spent : 0);
-    const closing = Math.max(nearest, walkSeconds[later] ?? 0);
-    const walks = weight * (now + closing);
+    const seconds = walkSeconds[walk] ?? 0;
+    // What is open then takes one more walk to close; so does what is spent, unless this walk goes out to it.
+    const closing = Math.max(nearest, walkSeconds[this.farthestOf(open)] ?? 0);
+    const out = walkSeconds[spent > walk ? spent : 0] ?? 0;
+    const walked = Math.min(seconds + Math.max(closing, out), Math.max(seconds, out) + closing);
+    const walks = weight * (walked - nearest);
     const openings = weight * hands + this.book.opening(set, before | open);
     const least = weight * nearest + far;
     return this.floor + openings + (before === 0 ? Math.max(walks, least) : walks);

@@ -26,7 +26,7 @@ export function settle(masks: Masks, set: number, open: number, spentBefore: num
     const within = set & (masks.beyond[v] ?? 0);
     const walk = masks.walkRank[v] ?? 0;
     if (within === 0) {
-      if (walk > spent) spent = walk;
+      if (walk > spent && (masks.walkSeconds[walk] ?? 0) > 0) spent = walk;
     } else if (within === set) {
       if (walk > forced) forced = walk;
     } else useful |= 1 << v;
