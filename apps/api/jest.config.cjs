@@ -16,5 +16,5 @@ module.exports = {
     '^@lampwright/([a-z]+)$': '<rootDir>/libs/$1/src/index.ts',
     '^@lampwright/([a-z]+)/testing$': '<rootDir>/libs/$1/src/testing/index.ts',
   },
-  testTimeout: 20_000,
+  testTimeout: 60_000,
 };
