@@ -35,7 +35,7 @@ export function HarnessDrawing(props: HarnessDrawingProps) {
   const { t } = useTranslation('drawing');
   const washId = useId();
   const [ref, sheet] = useSize<HTMLDivElement>();
-  const { transform, settled, ...zoom } = useZoom(ref, sheet);
+  const { transform, settled, ...zoom } = useZoom(ref, sheet, !compact);
   const { describe } = usePartWords(marks);
 
   const kept = JSON.stringify([...marks.cut, ...marks.open].sort());
@@ -111,7 +111,11 @@ export function HarnessDrawing(props: HarnessDrawingProps) {
 
   return (
     <div className="lw-drawing">
-      <div className="lw-sheet" ref={ref} style={{ background: colours.paper }}>
+      <div
+        className="lw-sheet"
+        ref={ref}
+        style={{ background: colours.paper, touchAction: compact ? 'auto' : 'none' }}
+      >
         <svg role="img" aria-label={pictureWords(t, harness.name, layout.parts, marks)}>
           <g transform={transform.toString()}>
             <TrailerOutline

@@ -1,6 +1,6 @@
 import type { LampColour } from '@lampwright/harness';
 import { symbolStyle } from './mark-style';
-import type { SymbolProps } from './part-symbol';
+import type { SymbolProps } from './symbol-props';
 
 /** Below this size the signs inside would only be smudges. */
 const SMALLEST_WITH_SIGN = 11;

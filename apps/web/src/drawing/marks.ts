@@ -16,10 +16,10 @@ export interface DrawingMarks {
   lamps?: ReadonlyMap<PartId, LampResult>;
 }
 
-/** The trailer's outline where it is known; without it the outline follows from the parts. */
+/** The trailer's outline where it is known; a size that is not given follows from the parts. */
 export interface DrawingTrailer {
-  lengthMetres: number;
-  widthMetres: number;
+  lengthMetres?: number;
+  widthMetres?: number;
   bodyType: BodyType;
 }
 
@@ -40,7 +40,7 @@ export interface HarnessView {
 export interface HarnessDrawingProps extends HarnessView {
   /** The unit of the scale bar. */
   lengths: LengthUnit;
-  /** Leaves out the legend, the zoom buttons and all labels but those of the cut and the find. */
+  /** Leaves out the legend, the zoom and all labels but those of the cut, the find and what is open. */
   compact?: boolean;
   trailer?: DrawingTrailer;
 }

@@ -1,20 +1,8 @@
-import type { Part } from '@lampwright/harness';
 import { colours } from './drawing-colours';
 import { LampSymbol } from './lamp-symbol';
 import { symbolStyle } from './mark-style';
-import type { PartMarks } from './place-marks';
 import { PlugSymbol } from './plug-symbol';
-
-export interface SymbolProps {
-  part: Part;
-  marks: PartMarks;
-  /** Side of the square it fills. */
-  size: number;
-  open: boolean;
-  /** Degrees by which the feed side is turned from the left. */
-  turn: number;
-  ink: number;
-}
+import type { SymbolProps } from './symbol-props';
 
 /** One part around the origin. Every kind has a shape of its own. */
 export function PartSymbol(props: SymbolProps) {

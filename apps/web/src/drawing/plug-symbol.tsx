@@ -1,6 +1,6 @@
 import { colours } from './drawing-colours';
 import { symbolStyle } from './mark-style';
-import type { SymbolProps } from './part-symbol';
+import type { SymbolProps } from './symbol-props';
 
 /** Two mated halves, the feed half where the wire comes in; opened, they stand apart. */
 export function PlugSymbol({ marks, size, open, turn, ink }: SymbolProps) {

@@ -15,15 +15,19 @@ export interface Zoom {
   fit: () => void;
 }
 
-/** Pinch, wheel and drag on an element, and the same by buttons. The sheet never leaves its frame. */
-export function useZoom(ref: RefObject<HTMLElement | null>, { width, height }: Size): Zoom {
+/** Pinch, wheel and drag on an element, and the same by buttons. The sheet never leaves its frame. While not `enabled` the page scrolls over it. */
+export function useZoom(
+  ref: RefObject<HTMLElement | null>,
+  { width, height }: Size,
+  enabled: boolean,
+): Zoom {
   const [transform, setTransform] = useState<ZoomTransform>(zoomIdentity);
   const [settled, setSettled] = useState(1);
   const behaviour = useRef<ZoomBehavior<HTMLElement, unknown> | null>(null);
 
   useEffect(() => {
     const element = ref.current;
-    if (!element) return;
+    if (!element || !enabled) return;
     const all: [[number, number], [number, number]] = [
       [0, 0],
       [width, height],
@@ -41,7 +45,7 @@ export function useZoom(ref: RefObject<HTMLElement | null>, { width, height }: S
     return () => {
       selection.on('.zoom', null);
     };
-  }, [ref, width, height]);
+  }, [ref, width, height, enabled]);
 
   const scaleBy = useCallback(
     (factor: number) => {

@@ -5,7 +5,7 @@ import type { DrawingTrailer } from '../marks';
 export interface Extent {
   length: number;
   width: number;
-  /** True where the size was inferred from the parts. */
+  /** True where the length was inferred from the parts. */
   inferred: boolean;
 }
 
@@ -18,16 +18,12 @@ const NARROWEST = 1.6;
 export function extentOf(parts: readonly Part[], trailer?: DrawingTrailer): Extent {
   const reach = Math.max(0, ...parts.map((part) => part.at.along));
   const side = 2 * Math.max(0, ...parts.map((part) => Math.abs(part.at.across)));
-  if (trailer) {
-    return {
-      length: Math.max(trailer.lengthMetres, reach),
-      width: Math.max(trailer.widthMetres, side),
-      inferred: false,
-    };
-  }
+  const { lengthMetres, widthMetres } = trailer ?? {};
   return {
-    length: Math.max(reach + 0.1, SHORTEST),
-    width: Math.max(side + 0.1, NARROWEST),
-    inferred: true,
+    length:
+      lengthMetres === undefined ? Math.max(reach + 0.1, SHORTEST) : Math.max(lengthMetres, reach),
+    width:
+      widthMetres === undefined ? Math.max(side + 0.1, NARROWEST) : Math.max(widthMetres, side),
+    inferred: lengthMetres === undefined,
   };
 }
