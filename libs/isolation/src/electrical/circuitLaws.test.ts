@@ -16,8 +16,9 @@ import { solveTree } from './resistorTree';
 import { solveCircuit } from './solveCircuit';
 import { wiringOf } from './wiring';
 
-const close = (a: number, b: number, scale = 0) =>
-  Math.abs(a - b) <= 1e-9 * Math.max(Math.abs(a), Math.abs(b), scale);
+/** To a billionth, or a femtoampere where the plan's loads are next to nothing. */
+const close = (a: number, b: number) =>
+  Math.abs(a - b) <= 1e-9 * Math.max(Math.abs(a), Math.abs(b), 1e-6);
 
 const feeding = { sourceOhms: 0.05, returnOhms: 0.02, copperCelsius: 35 };
 

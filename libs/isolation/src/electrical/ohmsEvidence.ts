@@ -38,7 +38,9 @@ export interface OhmsEvidence {
   fits: PlaceFit[];
   /** Metres of conductor from the point to the short, over all places that fit; `null` where none does. */
   distance: { least: number; most: number } | null;
-  /** True where a short fits, and every metered place fits it: the reading tells none from another. */
+  /** Metres of conductor from the point to the farthest that the meter sees. */
+  reach: number;
+  /** True where a short fits, but one step of the display is worth the whole reach: it tells no place from another. */
   tooCoarse: boolean;
   /** Metres of the thickest metered conductor that one step of the display stands for; `null` without a conductor. */
   metresPerStep: number | null;
@@ -65,14 +67,17 @@ export function ohmsEvidence(question: OhmsQuestion): OhmsEvidence {
 
   const healthy = { least: healthyOhms(view.least), most: healthyOhms(view.most) };
   const contactOhms = notNegative('contactOhms', question.contactOhms ?? 0);
-  const { fits, reached } = placesThatFit(view, tree, read, contactOhms);
+  const fits = placesThatFit(view, tree, read, contactOhms);
+  const reach = view.usual.network.metres.reduce((most, metres) => Math.max(most, metres), 0);
+  const step = metresPerStep(view, meter.resolution);
   return {
     healthy,
     lampsMayExplain: healthy.least <= read.most && read.least <= healthy.most,
     fits,
     distance: fits.length > 0 ? span(fits) : null,
-    tooCoarse: fits.length > 0 && fits.length === reached && fits.every(({ whole }) => whole),
-    metresPerStep: metresPerStep(view, meter.resolution),
+    reach,
+    tooCoarse: fits.length > 0 && step !== null && step >= reach,
+    metresPerStep: step,
     likelihood: ohmsLikelihood(view, tree, read, { contact, misread }),
   };
 }

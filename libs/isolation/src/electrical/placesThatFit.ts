@@ -15,23 +15,21 @@ export interface PlaceFit {
 
 /**
  * Every metered place where a short of 0 to `contactOhms` gives the reading, within the bounds of wires and lamps; a
- * run by the stretch of it that does. `reached` counts all metered places. O(places).
+ * run by the stretch of it that does. O(places).
  */
 export function placesThatFit(
   view: MeterView,
   tree: SectionTree,
   read: OhmsRange,
   contactOhms: number,
-): { fits: PlaceFit[]; reached: number } {
+): PlaceFit[] {
   const fits: PlaceFit[] = [];
-  let reached = 0;
   for (const { ref } of tree.sections.flatMap(({ places }) => places)) {
     const spotAt = (fraction: number) => {
       return locate(view.wiring, view.usual.network, { place: ref, fraction });
     };
     const [start, end] = [spotAt(0), spotAt(1)];
     if (!start || !end) continue;
-    reached += 1;
     const forward = start.metres <= end.metres;
     const at = (share: number) => spotAt(forward ? share : 1 - share) ?? start;
     const notBeyond = (share: number) => shortedOhms(view.least, at(share), 0) <= read.most;
@@ -45,7 +43,7 @@ export function placesThatFit(
     const metres = { least: at(first).metres, most: at(last).metres };
     fits.push({ place: ref, metres, whole: first === 0 && last === 1 });
   }
-  return { fits, reached };
+  return fits;
 }
 
 /** Where a statement that holds at 0 and fails at 1 turns, to a millionth. */
