@@ -1,20 +1,31 @@
-import { createContext, useContext, useMemo, type ReactNode } from 'react';
+import { createContext, useContext, useMemo, type MouseEvent, type ReactNode } from 'react';
 
-/** Lets a tap through unless it follows the last one too closely. */
-export interface TapGuard {
-  allows: (milliseconds: number) => boolean;
+/** Where and when a finger came down, in CSS pixels and milliseconds. */
+interface Tap {
+  x: number;
+  y: number;
+  at: number;
 }
+
+/** Lets a tap through unless it is the second half of a double tap. */
+export interface TapGuard {
+  allows: (tap: Tap) => boolean;
+}
+
+/** A glove that bounces comes down within a finger's width of where it was. */
+const SAME_PLACE = 48;
 
 /**
  * One guard serves a whole screen: after an answer the next question stands in the same place, and the second half of
- * a double tap must not answer it.
+ * a double tap must not answer it. Two taps in two places are two answers, however quick.
  */
 export function createTapGuard(pause: number): TapGuard {
-  let last = Number.NEGATIVE_INFINITY;
+  let last: Tap = { x: 0, y: 0, at: Number.NEGATIVE_INFINITY };
   return {
-    allows: (now) => {
-      if (now - last < pause) return false;
-      last = now;
+    allows: (tap) => {
+      const near = Math.hypot(tap.x - last.x, tap.y - last.y) < SAME_PLACE;
+      if (near && tap.at - last.at < pause) return false;
+      last = tap;
       return true;
     },
   };
@@ -35,9 +46,9 @@ interface TapGuardProviderProps {
 }
 
 /** Wraps what a tap does, so that the second half of a double tap does nothing. */
-export function useGuardedTap(onTap: () => void): () => void {
+export function useGuardedTap(onTap: () => void): (event: MouseEvent) => void {
   const guard = useContext(TapGuardContext);
-  return () => {
-    if (!guard || guard.allows(performance.now())) onTap();
+  return ({ clientX, clientY }) => {
+    if (!guard || guard.allows({ x: clientX, y: clientY, at: performance.now() })) onTap();
   };
 }
