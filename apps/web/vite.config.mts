@@ -13,6 +13,9 @@ const vendor = [
   { name: 'words', test: /node_modules[\\/](i18next|react-i18next)[\\/]/ },
 ];
 
+/** Modules that only export: what no screen uses of them is left out of its chunk. */
+const onlyExports = /\/(apps\/web\/src\/(ui|lib|drawing)|libs\/[^/]+\/src)\/[^?]*\.tsx?$/;
+
 export default defineConfig({
   root: fileURLToPath(new URL('.', import.meta.url)),
   cacheDir: `${repo}node_modules/.vite/web`,
@@ -23,7 +26,10 @@ export default defineConfig({
     outDir: `${repo}dist/apps/web`,
     emptyOutDir: true,
     manifest: true,
-    rolldownOptions: { output: { codeSplitting: { groups: vendor } } },
+    rolldownOptions: {
+      treeshake: { moduleSideEffects: (id) => !onlyExports.test(id) },
+      output: { codeSplitting: { groups: vendor } },
+    },
   },
   test: {
     environment: 'jsdom',

@@ -4,7 +4,7 @@ function channel(value: number): number {
 }
 
 /** Relative luminance of `#RRGGBB`, 0 to 1 (WCAG 2.2, "relative luminance"). */
-export function luminance(hex: string): number {
+function luminance(hex: string): number {
   const [red, green, blue] = [1, 3, 5].map((at) => channel(parseInt(hex.slice(at, at + 2), 16)));
   return 0.2126 * (red ?? 0) + 0.7152 * (green ?? 0) + 0.0722 * (blue ?? 0);
 }

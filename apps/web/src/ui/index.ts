@@ -28,4 +28,4 @@ export { TextLink } from './text-link';
 export { TrailerState } from './trailer-state';
 export { toast } from './toast';
 export { Toaster } from './toaster';
-export { Mark, Wordmark } from './wordmark';
+export { Wordmark } from './wordmark';

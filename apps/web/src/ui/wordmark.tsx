@@ -15,7 +15,7 @@ const Root = chakra('span', {
 });
 
 /** Two lamps on one harness, and the cut between them. */
-export function Mark({ size = 34 }: { size?: number }) {
+function Mark({ size = 34 }: { size?: number }) {
   return (
     <svg width={size} height={size} viewBox="1 2 30 28" fill="none" aria-hidden="true">
       <path

@@ -15,7 +15,7 @@ export const updateAccount = (body: UpdateAccountRequest) =>
 export const changePassword = (body: ChangePasswordRequest) =>
   api.post<undefined>('auth/account/password', body);
 
-export const ownSessionsKey = () => ['account', 'sessions'] as const;
+const ownSessionsKey = () => ['account', 'sessions'] as const;
 export const useOwnSessions = () =>
   useSWR(ownSessionsKey(), () => api.get<SessionDto[]>('auth/account/sessions'));
 

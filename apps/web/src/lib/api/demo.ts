@@ -2,5 +2,5 @@ import type { DemoDto } from '@lampwright/contracts';
 import useSWR from 'swr';
 import { api } from '../client';
 
-export const demoKey = () => ['demo'] as const;
+const demoKey = () => ['demo'] as const;
 export const useDemo = () => useSWR(demoKey(), () => api.get<DemoDto>('demo'));

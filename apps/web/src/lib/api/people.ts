@@ -9,7 +9,7 @@ import type {
 import useSWR from 'swr';
 import { api } from '../client';
 
-export const peopleKey = (query: PageQuery) => ['people', query] as const;
+const peopleKey = (query: PageQuery) => ['people', query] as const;
 export const usePeople = (query: PageQuery) =>
   useSWR(peopleKey(query), () => api.get<Page<PersonDto>>('people', query));
 
@@ -21,7 +21,7 @@ export const updatePerson = (id: string, body: UpdatePersonRequest) =>
 export const closePerson = (id: string) => api.post<PersonDto>(`people/${id}/close`);
 export const reopenPerson = (id: string) => api.post<PersonDto>(`people/${id}/reopen`);
 
-export const personSessionsKey = (id: string) => ['people', id, 'sessions'] as const;
+const personSessionsKey = (id: string) => ['people', id, 'sessions'] as const;
 export const usePersonSessions = (id: string) =>
   useSWR(personSessionsKey(id), () => api.get<SessionDto[]>(`people/${id}/sessions`));
 

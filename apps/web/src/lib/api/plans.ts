@@ -8,11 +8,11 @@ import type {
 import useSWR from 'swr';
 import { api } from '../client';
 
-export const plansKey = (query: PageQuery) => ['plans', query] as const;
+const plansKey = (query: PageQuery) => ['plans', query] as const;
 export const usePlans = (query: PageQuery) =>
   useSWR(plansKey(query), () => api.get<Page<PlanSummaryDto>>('plans', query));
 
-export const planKey = (id: string) => ['plans', id] as const;
+const planKey = (id: string) => ['plans', id] as const;
 export const usePlan = (id: string | null) =>
   useSWR(id === null ? null : planKey(id), () => api.get<PlanDto>(`plans/${id}`));
 

@@ -10,7 +10,7 @@ import type {
 import useSWR from 'swr';
 import { api } from '../client';
 
-export const tracesKey = (query: TraceListQuery) => ['traces', query] as const;
+const tracesKey = (query: TraceListQuery) => ['traces', query] as const;
 export const useTraces = (query: TraceListQuery | null) =>
   useSWR(query === null ? null : tracesKey(query), () =>
     api.get<Page<TraceSummaryDto>>('traces', query ?? {}),

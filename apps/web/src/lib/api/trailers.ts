@@ -8,11 +8,11 @@ import type {
 import useSWR from 'swr';
 import { api } from '../client';
 
-export const trailersKey = (query: TrailerListQuery) => ['trailers', query] as const;
+const trailersKey = (query: TrailerListQuery) => ['trailers', query] as const;
 export const useTrailers = (query: TrailerListQuery) =>
   useSWR(trailersKey(query), () => api.get<Page<TrailerDto>>('trailers', query));
 
-export const trailerKey = (id: string) => ['trailers', id] as const;
+const trailerKey = (id: string) => ['trailers', id] as const;
 export const useTrailer = (id: string | null) =>
   useSWR(id === null ? null : trailerKey(id), () => api.get<TrailerDto>(`trailers/${id}`));
 
