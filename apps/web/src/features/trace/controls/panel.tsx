@@ -49,11 +49,12 @@ export const PanelAnswers = chakra('div', {
 export const PanelMore = chakra('div', {
   base: {
     display: 'flex',
-    flexDirection: 'column',
+    flexDirection: { base: 'column', md: 'row', lg: 'column' },
     gap: 'touch',
     paddingX: { base: '4', md: '5' },
     paddingBottom: '4',
     bg: 'bg.panel',
+    '& > *': { md: { flex: '1 1 auto' }, lg: { flex: 'none' } },
   },
 });
 

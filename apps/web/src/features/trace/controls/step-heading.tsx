@@ -21,7 +21,9 @@ export function StepHeading({ screen, children }: StepHeadingProps) {
   const ref = useRef<HTMLHeadingElement>(null);
   useEffect(() => {
     ref.current?.focus({ preventScroll: true });
-    ref.current?.closest('[data-panel-scroll]')?.scrollTo?.({ top: 0 });
+    // In landscape the panel scrolls, on a phone the page does.
+    ref.current?.parentElement?.scrollTo?.({ top: 0 });
+    window.scrollTo({ top: 0 });
   }, [screen]);
   return (
     <Heading ref={ref} tabIndex={-1}>

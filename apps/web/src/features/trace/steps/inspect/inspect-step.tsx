@@ -70,7 +70,7 @@ export function InspectStep() {
   const where = current.ref.kind === 'part' ? names.where(current.ref.id) : '';
   return (
     <Panel>
-      <PanelBody data-panel-scroll>
+      <PanelBody>
         <Eyebrow>{t('inspect.eyebrow', { left: left.length, of: places.length })}</Eyebrow>
         <StepHeading screen={placeKey(current.ref)}>
           {t('inspect.title', { place: names.place(current.ref) })}

@@ -7,11 +7,10 @@ import { BarScreen } from './bar-screen';
 import { DamageScreen } from './damage-screen';
 import { ElseScreen } from './else-screen';
 import { FeedChangeScreen } from './feed-change-screen';
+import type { NarrowMode } from './narrow-mode';
 import { PickScreen } from './pick-screen';
 import { PlanWrongScreen } from './plan-wrong-screen';
 import { PowerUpScreen } from './power-up-screen';
-
-export type NarrowMode = 'powerUp' | 'bar' | 'pick' | 'else' | 'plan' | 'damage' | 'feed';
 
 /** The next power-up, and what can be said instead of doing it. */
 export function DecidingScreens() {

@@ -7,7 +7,7 @@ import { useRecord, useTraceContext } from '../../store/trace-session';
 import { useNames } from '../../words/use-names';
 import { useTraceWords } from '../../words/use-trace-words';
 import { Callout } from '../../../../ui';
-import type { NarrowMode } from './deciding-screens';
+import type { NarrowMode } from './narrow-mode';
 
 interface ElseScreenProps {
   go: (mode: NarrowMode) => void;

@@ -15,7 +15,7 @@ import { AmpsField, readAmps } from '../amps-field';
 import { OrderOfDoing } from '../order-of-doing';
 import { PowerOn } from '../power-on';
 import { ReadingAnswers } from '../reading-answers';
-import type { NarrowMode } from './deciding-screens';
+import type { NarrowMode } from './narrow-mode';
 import { Reason } from './reason';
 import { useAnswerMeanings } from './use-answer-meanings';
 import { usePoints } from './use-points';
@@ -68,7 +68,7 @@ export function PowerUpScreen({ next, go, pick }: PowerUpScreenProps) {
   const n = count + 1;
   return (
     <Panel>
-      <PanelBody data-panel-scroll>
+      <PanelBody>
         <Eyebrow>
           {hunt > 1 ? t('narrow.eyebrowHunt', { n, hunt }) : t('narrow.eyebrow', { n })}
         </Eyebrow>
