@@ -5,7 +5,7 @@ const Art = chakra('svg', {
     w: 'full',
     maxW: '640px',
     h: 'auto',
-    display: { base: 'none', md: 'block' },
+    display: { base: 'none', lg: 'block' },
     fill: 'none',
     '& .body': { fill: 'bg.panel', stroke: 'fg', strokeWidth: '2' },
     '& .cleared': { stroke: 'slate.mark', strokeWidth: '2.5' },

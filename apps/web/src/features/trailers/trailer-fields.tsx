@@ -58,7 +58,6 @@ export function TrailerFields({
       <Two>
         <TextInput
           label={t('unit')}
-          hint={t('unitHint')}
           error={errors.unit?.message}
           {...form.register('unit', {
             validate: (text) => text.trim() !== '' || t('need.unit'),
@@ -67,7 +66,6 @@ export function TrailerFields({
         />
         <TextInput
           label={t('fleet')}
-          hint={' '}
           error={errors.fleet?.message}
           {...form.register('fleet', {
             validate: (text) => text.trim() !== '' || t('need.fleet'),

@@ -46,7 +46,6 @@ export default {
   editTitle: 'Edit unit {{unit}}',
   back: 'Trailers',
   backToUnit: 'Unit {{unit}}',
-  unitHint: 'As it is painted on the trailer',
   lengthFeet: 'Length in feet',
   lengthMetres: 'Length in metres',
   widthFeet: 'Width in feet',
