@@ -54,7 +54,7 @@ export const PanelMore = chakra('div', {
     paddingX: { base: '4', md: '5' },
     paddingBottom: '4',
     bg: 'bg.panel',
-    '& > *': { md: { flex: '1 1 auto' }, lg: { flex: 'none' } },
+    '&& > *': { minWidth: '0', flex: { md: '1 1 0', lg: 'none' } },
   },
 });
 

@@ -73,7 +73,8 @@ export function HistoryStrip() {
       ? t('page.allConnected')
       : t('page.open', { points: names.list(open.map(names.code)) });
   useEffect(() => {
-    list.current?.lastElementChild?.scrollIntoView?.({ block: 'nearest', inline: 'end' });
+    // Sideways alone: bringing the newest into view must not move the page away from the instruction.
+    list.current?.scrollTo?.({ left: list.current.scrollWidth });
   }, [powerUps.length]);
   return (
     <Strip>

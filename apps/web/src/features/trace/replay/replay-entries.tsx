@@ -21,7 +21,12 @@ export function ReplayEntries({ events, at, words, onMove }: ReplayEntriesProps)
   const t = useTraceWords();
   const list = useRef<HTMLOListElement>(null);
   useEffect(() => {
-    list.current?.children[at - 1]?.scrollIntoView?.({ block: 'nearest' });
+    const entry = list.current?.children[at - 1];
+    const body = list.current?.parentElement;
+    if (!entry || !body) return;
+    // Only within the panel: on a phone, where the page scrolls, the entry is told in full at the top.
+    const { top } = entry.getBoundingClientRect();
+    body.scrollTo?.({ top: body.scrollTop + top - body.getBoundingClientRect().top - 12 });
   }, [at]);
   return (
     <Entries ref={list} aria-label={t('replay.list')}>
