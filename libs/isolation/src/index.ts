@@ -3,6 +3,7 @@ export type { Alternative } from './alternatives';
 export { after } from './after';
 export { ANOTHER_SHORT_FACTOR, believe } from './belief';
 export { closingSeconds, pointsOf, powerUpSeconds } from './costs';
+export { MISREAD } from './electrical/againstBest';
 export { DEFAULT_AMMETER } from './electrical/ammeter';
 export type { Ammeter, AmpsRange } from './electrical/ammeter';
 export { ampsLikelihood } from './electrical/ampsLikelihood';
@@ -22,8 +23,18 @@ export type { AmpsBand, ExpectedLoad, LoadOptions } from './electrical/expectedL
 export { faultFacts } from './electrical/faultFacts';
 export type { FaultFacts, RunUnderFault } from './electrical/faultFacts';
 export type { Feeding } from './electrical/feeding';
-export { circularMils, onderdonkAmps, preeceAmps } from './electrical/fusing';
-export { ADIABATIC_SECONDS, celsiusAfter, PVC_K, withstand } from './electrical/heating';
+export { circularMils, onderdonkAmps, PREECE, preeceAmps } from './electrical/fusing';
+export {
+  ADIABATIC_SECONDS,
+  adiabaticK,
+  adiabaticMm2,
+  ALUMINIUM,
+  celsiusAfter,
+  COPPER,
+  PVC_K,
+  withstand,
+} from './electrical/heating';
+export type { Metal } from './electrical/heating';
 export { LAMP_BANDS } from './electrical/lampBand';
 export type { Band, LampBands } from './electrical/lampBand';
 export { COLD_FILAMENT } from './electrical/loads';

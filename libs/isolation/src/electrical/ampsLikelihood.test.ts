@@ -16,11 +16,17 @@ const [energised, others] = [true, false].map((on) =>
 const at = (sections: number[] | undefined, values: readonly number[]) =>
   (sections ?? []).map((index) => values[index]!);
 
+const contact = { hard: 0.01, most: 1000 };
+/** Even over log(1 + ohms / hard), as contacts are believed to be. */
+const contactGrid = Array.from({ length: 2000 }, (_, step) => {
+  return contact.hard * Math.expm1(((step + 0.5) / 2000) * Math.log1p(contact.most / contact.hard));
+});
+
 describe('ampsLikelihood', () => {
   it('puts a short that draws too much but does not trip into what is energised', () => {
     const likelihood = ampsLikelihood(tree, leds, CIRCUIT, ['p2'], 2.5);
     expect(Math.max(...at(others, likelihood))).toBeCloseTo(0.01, 12);
-    expect(Math.min(...at(energised, likelihood))).toBeGreaterThan(0.02);
+    expect(Math.min(...at(energised, likelihood))).toBeGreaterThan(0.9);
   });
 
   it('speaks for the rest where the lamps alone explain the reading', () => {
@@ -38,7 +44,7 @@ describe('ampsLikelihood', () => {
   });
 
   it('tells a short far along a thin wire from one at the inlet by the most that it can draw', () => {
-    // A dead short at the end of 12 m of 14 AWG draws about 120 A; 150 A can only come from nearer.
+    // A dead short at the end of 11 m of 14 AWG draws 132 A; 150 A can only come from nearer.
     const likelihood = ampsLikelihood(tree, leds, CIRCUIT, [], 150, {
       meter: { resolution: 0.1, tolerance: 0 },
     });
@@ -47,32 +53,35 @@ describe('ampsLikelihood', () => {
     expect(likelihood[0]).toBeGreaterThan(0.01);
   });
 
-  it('is the share of contacts that give the reading, as a fine grid of solved circuits has it', () => {
-    const contact = { hard: 0.01, most: 1000 };
+  describe('has the share of contacts that give the reading, as a fine grid of solved circuits does', () => {
     const meter = { resolution: 0.1, tolerance: 0.03 };
-    const section = tree.sections.find(({ point }) => point?.partId === 'rear1')!.index;
-    const { least, most } = expectedLoad(leds, CIRCUIT);
-    for (const reading of [0.3, 1.5, 12, 40]) {
+    const raw = (open: string[], reading: number) =>
+      ampsLikelihood(tree, leds, CIRCUIT, open, reading, { contact, meter, misread: 0 });
+    const sectionOf = (id: string) =>
+      tree.sections.find(({ point }) => point?.partId === id)!.index;
+    const gridShare = (open: string[], id: string, reading: number) => {
+      const { amps, least, most } = expectedLoad(leds, CIRCUIT, open);
       const read = trueAmps(reading, meter);
-      const healthy = solveCircuit(leds, CIRCUIT).amps;
-      const steps = 1000;
-      let inside = 0;
-      for (let step = 0; step < steps; step += 1) {
-        // Even over log(1 + ohms / hard).
-        const ohms =
-          contact.hard *
-          Math.expm1(((step + 0.5) / steps) * Math.log1p(contact.most / contact.hard));
-        const shorts = [{ place: { kind: 'part', id: 'rear1' } as const, ohms }];
-        const extra = solveCircuit(leds, CIRCUIT, { shorts }).amps - healthy;
-        if (least + extra <= read.most && read.least <= most + extra) inside += 1;
-      }
-      const likelihood = ampsLikelihood(tree, leds, CIRCUIT, [], reading, {
-        contact,
-        meter,
-        misread: 0,
+      const inside = contactGrid.filter((ohms) => {
+        const shorts = [{ place: { kind: 'part', id } as const, ohms }];
+        const extra = solveCircuit(leds, CIRCUIT, { open, shorts }).amps - amps;
+        return least + extra <= read.most && read.least <= most + extra;
       });
-      expect(Math.abs(likelihood[section]! - inside / steps)).toBeLessThan(2 / steps);
-    }
+      return inside.length / contactGrid.length;
+    };
+
+    it.each([0.05, 0.1, 0.2])('%d A, which lamps alone may draw', (reading) => {
+      // Sections without power fit wholly, so the others show their share itself.
+      const likelihood = raw(['p2'], reading);
+      expect(likelihood[sectionOf('front1')]).toBeCloseTo(gridShare(['p2'], 'front1', reading), 2);
+    });
+
+    it.each([1.5, 60, 122])('%d A, which needs a short', (reading) => {
+      const likelihood = raw([], reading);
+      const ratio = likelihood[sectionOf('rear1')]! / likelihood[sectionOf('front1')]!;
+      const grid = gridShare([], 'rear1', reading) / gridShare([], 'front1', reading);
+      expect(Math.abs(ratio / grid - 1)).toBeLessThan(0.05);
+    });
   });
 
   it('always allows for the section whose short really gave the reading', () => {

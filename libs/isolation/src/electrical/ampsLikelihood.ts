@@ -5,6 +5,7 @@ import {
   type PartId,
   type SectionTree,
 } from '@lampwright/harness';
+import { againstBest, MISREAD } from './againstBest';
 import { DEFAULT_AMMETER, trueAmps } from './ammeter';
 import type { AmpsVerdictOptions } from './ampsVerdict';
 import { bySection } from './bySection';
@@ -23,13 +24,13 @@ export interface AmpsLikelihoodOptions extends AmpsVerdictOptions {
   contact?: ContactOhms;
   /** Probability that an energised short is there at the moment of reading. Default 1. */
   detection?: number;
-  /** Probability that the reading says nothing: a clamp on the wrong wire, a slip of the pen. Default 0.01 (ours). */
+  /** Probability that the reading says nothing. Default `MISREAD`. */
   misread?: number;
 }
 
 /**
- * By section index: how well an amps reading of a circuit that holds fits one short there, from `misread` to 1, to
- * multiply a belief's probabilities with. It takes the place of the outcome "holds" where a short may be too weak to
+ * By section index: how well an amps reading of a circuit that holds fits one short there, against the section that it
+ * fits best (`againstBest`), to reweigh a belief with. It takes the place of the outcome "holds" where a short may be too weak to
  * trip. A short in an energised section adds its amps to what the lamps draw within their bands; elsewhere it adds none.
  * The contact's ohms that the reading leaves are worked out in closed form, so there is no grid. O(parts + places).
  *
@@ -44,7 +45,7 @@ export function ampsLikelihood(
   amps: number,
   options: AmpsLikelihoodOptions = {},
 ): number[] {
-  const { contact = CONTACT_UNDER_POWER, detection = 1, misread = 0.01 } = options;
+  const { contact = CONTACT_UNDER_POWER, detection = 1, misread = MISREAD } = options;
   const expected = expectedLoad(harness, circuit, open, options);
   const read = trueAmps(amps, options.meter ?? DEFAULT_AMMETER);
   const excess = { least: read.least - expected.most, most: read.most - expected.least };
@@ -65,9 +66,9 @@ export function ampsLikelihood(
     const contactFor = (extra: number) => (extra > 0 ? drawing / extra - port.ohms : Infinity);
     return contactBetween(contactFor(excess.most), contactFor(excess.least), contact);
   });
-  return energisedSections(tree, open).map((energised, section) => {
+  const fits = energisedSections(tree, open).map((energised, section) => {
     const shown = energised ? detection : 0;
-    const fit = shown * (shorted[section] ?? 0) + (1 - shown) * healthy;
-    return misread + (1 - misread) * fit;
+    return shown * (shorted[section] ?? 0) + (1 - shown) * healthy;
   });
+  return againstBest(fits, misread);
 }

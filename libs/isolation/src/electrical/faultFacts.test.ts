@@ -1,5 +1,6 @@
 import type { Conductor, Harness } from '@lampwright/harness';
 import { chain, CIRCUIT } from '@lampwright/harness/testing';
+import fc from 'fast-check';
 import { faultFacts } from './faultFacts';
 import { trailer, CIRCUIT as TAIL } from './testing/trailer';
 
@@ -23,6 +24,32 @@ describe('faultFacts', () => {
       sourceOhms: 0.05,
     });
     expect(Math.abs(amps - about)).toBeLessThan(5);
+  });
+
+  it('draws less the longer, the thinner and the poorer the way', () => {
+    const lengths = fc.record({
+      feet: fc.double({ min: 1, max: 60, noNaN: true }),
+      more: fc.double({ min: 0.1, max: 20, noNaN: true }),
+      awg: fc.integer({ min: 4, max: 20 }),
+      ohms: fc.double({ min: 0, max: 2, noNaN: true }),
+    });
+    fc.assert(
+      fc.property(lengths, ({ feet, more, awg, ohms }) => {
+        const amps = (length: number, size: number, contact: number) =>
+          faultFacts(
+            oneRun(length, { awg: size }),
+            CIRCUIT,
+            { place: { kind: 'part', id: 'end' }, ohms: contact },
+            { sourceOhms: 0.05 },
+          ).amps;
+        const here = amps(feet, awg, ohms);
+        return (
+          amps(feet + more, awg, ohms) < here &&
+          amps(feet, awg + 1, ohms) < here &&
+          amps(feet, awg, ohms + 0.1) < here
+        );
+      }),
+    );
   });
 
   it('names the runs on the way and the one that stands it least', () => {

@@ -1,4 +1,5 @@
 import { sectionTree, type SectionTree } from '@lampwright/harness';
+import { MISREAD } from './againstBest';
 import { CONTACT_OF_OVERLOAD, type ContactOhms } from './contact';
 import { notNegative } from './feeding';
 import { healthyOhms } from './meterReadings';
@@ -25,7 +26,7 @@ export interface OhmsQuestion extends MeterPoint {
   tree?: SectionTree;
   /** What the short's own ohms may be in the likelihood. Default `CONTACT_OF_OVERLOAD`. */
   contact?: ContactOhms;
-  /** Probability that the reading says nothing. Default 0.01 (ours). */
+  /** Probability that the reading says nothing. Default `MISREAD`. */
   misread?: number;
 }
 
@@ -44,7 +45,7 @@ export interface OhmsEvidence {
   tooCoarse: boolean;
   /** Metres of the thickest metered conductor that one step of the display stands for; `null` without a conductor. */
   metresPerStep: number | null;
-  /** By section index: how well the reading fits one short there, from `misread` to 1. */
+  /** By section index: how well the reading fits one short there, against the best; to reweigh a belief with. */
   likelihood: number[];
 }
 
@@ -57,7 +58,7 @@ export interface OhmsEvidence {
  */
 export function ohmsEvidence(question: OhmsQuestion): OhmsEvidence {
   const { harness, circuit, ohms, meter = DEFAULT_OHMMETER } = question;
-  const { contact = CONTACT_OF_OVERLOAD, misread = 0.01 } = question;
+  const { contact = CONTACT_OF_OVERLOAD, misread = MISREAD } = question;
   const tree = question.tree ?? sectionTree(harness, circuit);
   const back = notNegative('returnOhms', question.returnOhms ?? 0);
   const view = meterView(question);

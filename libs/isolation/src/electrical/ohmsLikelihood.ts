@@ -1,4 +1,5 @@
 import type { SectionTree } from '@lampwright/harness';
+import { againstBest } from './againstBest';
 import { bySection } from './bySection';
 import { contactBetween, type ContactOhms } from './contact';
 import { locate } from './locate';
@@ -14,8 +15,9 @@ const ASSUMPTIONS: readonly (readonly [Assumption, number])[] = [
 ];
 
 /**
- * By section index: how probable the reading is with one short there. Where the meter does not look, it is what the
- * healthy harness gives. The contact's ohms that the reading leaves are worked out in closed form. O(places).
+ * By section index: how probable the reading is with one short there, against the best of them (`againstBest`). Where
+ * the meter does not look, it is what the healthy harness gives. The contact's ohms that the reading leaves are worked
+ * out in closed form. O(places).
  */
 export function ohmsLikelihood(
   view: MeterView,
@@ -24,14 +26,15 @@ export function ohmsLikelihood(
   { contact, misread }: { contact: ContactOhms; misread: number },
 ): number[] {
   const healthy = healthyFit(view, read);
-  return bySection(tree, (spot) => {
+  const fits = bySection(tree, (spot) => {
     const at = locate(view.wiring, view.usual.network, spot);
     if (!at) return healthy;
     return ASSUMPTIONS.reduce((sum, [which, weight]) => {
       const [low, high] = [read.least, read.most].map((ohms) => contactFor(view[which], at, ohms));
       return sum + weight * contactBetween(low ?? 0, high ?? 0, contact);
     }, 0);
-  }).map((fit) => misread + (1 - misread) * fit);
+  });
+  return againstBest(fits, misread);
 }
 
 /** The part of what a healthy harness may read that lies within the reading. */
