@@ -49,6 +49,15 @@ describe('a meter at an opened point', () => {
     expect(at.metres).toBeCloseTo(9, 12);
   });
 
+  it('reckons along a run from the end that the meter is at', () => {
+    // From p2 back towards the inlet: 3 m to s1, then 4 m to p1; a quarter from p1 is 3 m from s1.
+    const view = meterView({ harness: leds, circuit: CIRCUIT, point: 'p2', side: 'feed' });
+    const spot = { place: { kind: 'run', id: 'to-s1' }, fraction: 0.25 } as const;
+    const at = locate(view.wiring, view.usual.network, spot)!;
+    expect(at.metres).toBeCloseTo(6, 12);
+    expect(shortedOhms(view.usual, at, 0)).toBeCloseTo(6 * conductorOhms({ awg: 14 }).usual, 12);
+  });
+
   it('is bounded: more ohms anywhere never read less (Rayleigh)', () => {
     const spots = sectionTree(bulbs, CIRCUIT).sections.flatMap(({ places }) => places);
     fc.assert(
