@@ -1,16 +1,12 @@
-import { z } from 'zod';
+import { isFlag, isText, listOf, oneOf, orNull, readAs, shapeOf } from '../../store/guards';
+import type { FeedDraft } from '../feed-choice';
 
 /** What has been said so far of the complaint and the feed. */
-const intakeDraft = z.object({
-  complaint: z.string().nullable(),
-  words: z.string(),
-  circuits: z.array(z.string()),
-  feedKind: z.enum(['seriesLamp', 'tester', 'breaker', 'fuse', 'ohmmeter']).nullable(),
-  breakerType: z.union([z.literal(1), z.literal(2), z.literal(3)]).nullable(),
-  atHand: z.boolean().nullable(),
-});
-
-export type IntakeDraft = z.infer<typeof intakeDraft>;
+export interface IntakeDraft extends FeedDraft {
+  complaint: string | null;
+  words: string;
+  circuits: string[];
+}
 
 export const emptyIntake: IntakeDraft = {
   complaint: null,
@@ -21,7 +17,13 @@ export const emptyIntake: IntakeDraft = {
   atHand: null,
 };
 
-export function readIntakeDraft(kept: unknown): IntakeDraft | null {
-  const read = intakeDraft.safeParse(kept);
-  return read.success ? read.data : null;
-}
+export const readIntakeDraft = readAs(
+  shapeOf<IntakeDraft>({
+    complaint: orNull(isText),
+    words: isText,
+    circuits: listOf(isText),
+    feedKind: orNull(oneOf('seriesLamp', 'tester', 'breaker', 'fuse', 'ohmmeter')),
+    breakerType: orNull(oneOf(1, 2, 3)),
+    atHand: orNull(isFlag),
+  }),
+);

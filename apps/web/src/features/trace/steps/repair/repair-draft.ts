@@ -1,17 +1,20 @@
-import { z } from 'zod';
+import { isNumber, isText, listOf, orNull, readAs, shapeOf } from '../../store/guards';
 
-const repairDraft = z.object({
-  /** Ids of the short lists; `other` for own words. */
-  cause: z.string().nullable(),
-  causeWords: z.string(),
-  correction: z.string().nullable(),
-  correctionWords: z.string(),
-  parts: z.array(z.object({ name: z.string(), quantity: z.number() })),
-  note: z.string(),
-});
+interface PartUsed {
+  name: string;
+  quantity: number;
+}
 
 /** What has been said so far of a repair. */
-export type RepairDraft = z.infer<typeof repairDraft>;
+export interface RepairDraft {
+  /** Ids of the short lists; `other` for own words. */
+  cause: string | null;
+  causeWords: string;
+  correction: string | null;
+  correctionWords: string;
+  parts: PartUsed[];
+  note: string;
+}
 
 export const emptyRepair: RepairDraft = {
   cause: null,
@@ -22,7 +25,13 @@ export const emptyRepair: RepairDraft = {
   note: '',
 };
 
-export function readRepairDraft(kept: unknown): RepairDraft | null {
-  const read = repairDraft.safeParse(kept);
-  return read.success ? read.data : null;
-}
+export const readRepairDraft = readAs(
+  shapeOf<RepairDraft>({
+    cause: orNull(isText),
+    causeWords: isText,
+    correction: orNull(isText),
+    correctionWords: isText,
+    parts: listOf(shapeOf<PartUsed>({ name: isText, quantity: isNumber })),
+    note: isText,
+  }),
+);

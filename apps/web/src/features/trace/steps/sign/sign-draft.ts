@@ -1,18 +1,20 @@
-import { z } from 'zod';
-
-const signDraft = z.object({
-  name: z.string().nullable(),
-  cause: z.string().nullable(),
-  correction: z.string().nullable(),
-  minutes: z.number().nullable(),
-});
+import { isNumber, isText, orNull, readAs, shapeOf } from '../../store/guards';
 
 /** What was changed before signing; `null` where what the record says still stands. */
-export type SignDraft = z.infer<typeof signDraft>;
+export interface SignDraft {
+  name: string | null;
+  cause: string | null;
+  correction: string | null;
+  minutes: number | null;
+}
 
 export const untouched: SignDraft = { name: null, cause: null, correction: null, minutes: null };
 
-export function readSignDraft(kept: unknown): SignDraft | null {
-  const read = signDraft.safeParse(kept);
-  return read.success ? read.data : null;
-}
+export const readSignDraft = readAs(
+  shapeOf<SignDraft>({
+    name: orNull(isText),
+    cause: orNull(isText),
+    correction: orNull(isText),
+    minutes: orNull(isNumber),
+  }),
+);
