@@ -1,6 +1,4 @@
 import type {
-  AppendEventsRequest,
-  AppendEventsResponse,
   OpenTraceRequest,
   Page,
   TraceDto,
@@ -16,10 +14,4 @@ export const useTraces = (query: TraceListQuery | null) =>
     api.get<Page<TraceSummaryDto>>('traces', query ?? {}),
   );
 
-/** Not through SWR: what is captured in a trace is kept on the device and folded on top. */
-export const getTrace = (id: string) => api.get<TraceDto>(`traces/${id}`);
-
 export const openTrace = (body: OpenTraceRequest) => api.post<TraceDto>('traces', body);
-
-export const appendEvents = (id: string, body: AppendEventsRequest) =>
-  api.post<AppendEventsResponse>(`traces/${id}/events`, body);

@@ -2,7 +2,7 @@ import type { AppendEventsRequest, AppendEventsResponse, TraceDto } from '@lampw
 import type { TraceEvent } from '@lampwright/trace';
 import { api } from '../../../lib/client';
 
-/** The server's side of one trace. */
+/** The server's side of one trace. Not through SWR: what is captured is kept on the device and folded on top. */
 export interface TraceApi {
   read: (id: string) => Promise<TraceDto>;
   append: (id: string, events: TraceEvent[]) => Promise<AppendEventsResponse>;
