@@ -216,4 +216,18 @@ describe('narrow', () => {
     await at(/^Unplug/);
     expect(await newest()).toMatchObject({ type: 'feed.changed', feed: { kind: 'seriesLamp' } });
   });
+
+  it('has the cautions of a feed with power ticked before an ohm-meter gives way to it', async () => {
+    const teller = new Teller().narrows(['tail'], { kind: 'ohmmeter', atHand: true });
+    const { tap, newest } = await renderTrace(record(teller));
+    await at(/^Unplug/);
+    await tap('More');
+    await tap('Change the feed');
+    await tap(/^Series lamp/);
+    expect(screen.getByRole('button', { name: '1 left' })).toBeDisabled();
+    await tap(/^Power on an overload only as long/);
+    await tap('Use this feed');
+    await at(/^Unplug/);
+    expect(await newest()).toMatchObject({ type: 'feed.changed', feed: { kind: 'seriesLamp' } });
+  });
 });

@@ -7,6 +7,8 @@ export default {
     minutesSoFar_other: '{{count}} min so far',
     leave: 'Yard',
     drawing: 'Drawing of the harness',
+    showList: 'List',
+    showDrawing: 'Drawing',
     undo: 'Undo',
     undone: 'Taken back: {{what}}.',
     history: 'Power-ups so far',
@@ -403,6 +405,7 @@ export default {
   },
   feedChange: {
     title: 'Change the feed',
+    cautions: 'This feed puts power on. Tick first:',
     use: 'Use this feed',
   },
   inspect: {
