@@ -31,7 +31,17 @@ import { colours } from './drawing-colours';
 
 /** The trailer from above, nose left, with its harness to scale and what is known of it. */
 export function HarnessDrawing(props: HarnessDrawingProps) {
-  const { harness, circuit, marks, lengths, onPick, pickable, compact = false, trailer } = props;
+  const {
+    harness,
+    circuit,
+    marks,
+    lengths,
+    onPick,
+    pickable,
+    compact = false,
+    trailer,
+    tools,
+  } = props;
   const { t } = useTranslation('drawing');
   const washId = useId();
   const [ref, sheet] = useSize<HTMLDivElement>();
@@ -192,7 +202,9 @@ export function HarnessDrawing(props: HarnessDrawingProps) {
         )}
       </div>
       {!compact && (
-        <DrawingFooter parts={layout.parts} marks={marks} zoom={zoom} wide={sheet.width >= 560} />
+        <DrawingFooter parts={layout.parts} marks={marks} zoom={zoom} wide={sheet.width >= 560}>
+          {tools}
+        </DrawingFooter>
       )}
     </div>
   );

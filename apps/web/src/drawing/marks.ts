@@ -1,5 +1,6 @@
 import type { CircuitId, Harness, PartId } from '@lampwright/harness';
 import type { BodyType, LampResult } from '@lampwright/trace';
+import type { ReactNode } from 'react';
 
 /** What is known of one place. `idle` is a place that no question is about. */
 export type PlaceMark = 'inQuestion' | 'cleared' | 'found' | 'idle';
@@ -43,6 +44,8 @@ export interface HarnessDrawingProps extends HarnessView {
   /** Leaves out the legend, the zoom and all labels but those of the cut, the find and what is open. */
   compact?: boolean;
   trailer?: DrawingTrailer;
+  /** A button that stands beside those of the zoom. */
+  tools?: ReactNode;
 }
 
 export type HarnessListProps = HarnessView;

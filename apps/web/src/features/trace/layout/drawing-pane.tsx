@@ -1,11 +1,12 @@
 import { chakra } from '@chakra-ui/react';
 import { stepOf, type Step } from '@lampwright/trace';
-import { useMemo } from 'react';
-import { HarnessDrawing, SuspicionBar } from '../../../drawing';
+import { useMemo, useState } from 'react';
+import { SuspicionBar } from '../../../drawing';
 import { useAccount } from '../../../lib/session-context';
 import { useTraceContext, useTraceLog } from '../store/trace-session';
 import { useTraceWords } from '../words/use-trace-words';
 import { useOverlay } from './overlay';
+import { FormSwitch, PlanView, type PlanForm } from './plan-view';
 import { usePhone } from './use-phone';
 import { useMarks } from './use-marks';
 import { useSlices } from './use-slices';
@@ -24,9 +25,13 @@ const Pane = chakra('div', {
 const Picture = chakra('div', {
   base: { flex: '1', minHeight: { base: '130px', md: '0' }, height: { base: '130px', md: 'auto' } },
 });
+const Foot = chakra('div', {
+  base: { display: 'flex', alignItems: 'center', justifyContent: 'flex-end', gap: 'touch' },
+});
 const Legend = chakra('p', {
   base: {
     display: 'flex',
+    flex: '1',
     paddingX: { base: '2', md: '0' },
     flexWrap: 'wrap',
     columnGap: '5',
@@ -44,10 +49,14 @@ export function DrawingPane() {
   const { lengths } = useAccount().preferences;
   const overlay = useOverlay();
   const harness = useTraceContext((context) => context.record.plan.harness);
+  const bodyType = useTraceContext((context) => context.record.trailer.bodyType);
+  const trailer = useMemo(() => ({ bodyType }), [bodyType]);
   const current = useTraceContext((context) => context.circuit);
   const marks = useMarks(overlay);
   const { slices, inQuestion, cleared } = useSlices();
   const hunting = useTraceLog((log) => HUNT.includes(stepOf(log)));
+  const hunted = hunting && slices.length > 0;
+  const [form, setForm] = useState<PlanForm>('drawing');
   const phone = usePhone();
   const circuit = overlay.circuit ?? current;
   const picking = useMemo(
@@ -60,23 +69,29 @@ export function DrawingPane() {
   return (
     <Pane role="group" aria-label={t('page.drawing')}>
       <Picture>
-        <HarnessDrawing
+        <PlanView
+          form={form}
+          onForm={setForm}
           harness={harness}
           circuit={circuit}
           marks={marks}
           lengths={lengths}
+          trailer={trailer}
           compact={phone}
           {...picking}
         />
       </Picture>
-      {hunting && slices.length > 0 && (
-        <>
-          {!phone && <SuspicionBar slices={slices} />}
-          <Legend>
-            <span>{t('narrow.inQuestion', { count: inQuestion })}</span>
-            <span>{t('narrow.cleared', { count: cleared })}</span>
-          </Legend>
-        </>
+      {hunted && !phone && <SuspicionBar slices={slices} />}
+      {(hunted || phone) && (
+        <Foot>
+          {hunted && (
+            <Legend>
+              <span>{t('narrow.inQuestion', { count: inQuestion })}</span>
+              <span>{t('narrow.cleared', { count: cleared })}</span>
+            </Legend>
+          )}
+          {phone && <FormSwitch form={form} onForm={setForm} />}
+        </Foot>
       )}
     </Pane>
   );
