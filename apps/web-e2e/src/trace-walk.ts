@@ -13,6 +13,11 @@ export class TraceWalk {
     return this.page.getByRole('heading', { level: 1 });
   }
 
+  /** Cards of the step that wait for a tick. A role query would take every plain button for one. */
+  private get unticked(): Locator {
+    return this.page.getByRole('main').locator('button[aria-pressed="false"]');
+  }
+
   button(name: string | RegExp): Locator {
     return this.page.getByRole('button', { name });
   }
@@ -27,10 +32,30 @@ export class TraceWalk {
     await this.page.waitForTimeout(410);
   }
 
+  /** From the yard to the first instruction of the narrowing. */
+  async toNarrow(): Promise<void> {
+    await this.start();
+    await this.sayWhatIsWrong();
+    await this.makeSafe();
+    await this.confirm();
+    await expect(this.title).toHaveText(/^Unplug/);
+  }
+
+  /** From the known section to the signature; lamps of `dark`, by label, stay dark. */
+  async fromInspect({ dark = [] }: { dark?: readonly string[] } = {}): Promise<void> {
+    await this.inspect();
+    await this.repair();
+    await this.prove();
+    await this.reconnect();
+    await this.lampCheck(dark);
+    await this.sign();
+    await expect(this.page.getByText('All sent')).toBeVisible();
+  }
+
   async start(): Promise<void> {
     await this.page.goto('/');
     await this.page.getByRole('link', { name: /^Start a trace/ }).tap();
-    await this.page.getByRole('radio', { name: new RegExp(`^${this.trailer.unit}`) }).check();
+    await this.page.getByRole('radio', { name: new RegExp(`^${this.trailer.unit}`) }).tap();
     await this.tap(`Start on unit ${this.trailer.unit}`);
     await expect(this.title).toHaveText('What is the complaint?');
   }
@@ -50,7 +75,7 @@ export class TraceWalk {
 
   async makeSafe(): Promise<void> {
     await expect(this.title).toHaveText('Make it safe first');
-    const cautions = this.page.getByRole('button', { pressed: false });
+    const cautions = this.unticked;
     while ((await cautions.count()) > 0) {
       const before = await cautions.count();
       await this.touch(cautions.first());
@@ -135,7 +160,7 @@ export class TraceWalk {
   }
 
   private async closeListed(title: string): Promise<void> {
-    const listed = this.page.getByRole('main').getByRole('button', { pressed: false });
+    const listed = this.unticked;
     while (((await this.title.textContent()) ?? '') === title) {
       const before = await listed.count();
       const words = (await listed.first().textContent()) ?? '';

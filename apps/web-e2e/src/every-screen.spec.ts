@@ -1,0 +1,70 @@
+import { demoTraces, demoYard } from '@lampwright/demo';
+import { expectAccessible, expectNoSidewaysScroll, themes, useTheme } from './audit';
+import { expect, test } from './fixtures';
+import { people, stateOf } from './people';
+
+const sizes = [
+  { width: 1180, height: 820 },
+  { width: 820, height: 1180 },
+  { width: 390, height: 844 },
+  { width: 1440, height: 900 },
+];
+
+const [trailer] = demoYard.trailers;
+const tank = demoYard.trailers.find(({ bodyType }) => bodyType === 'tank');
+const [signed] = demoTraces();
+const id = (thing: { id: string } | undefined) => {
+  if (!thing) throw new Error('The demo yard lacks what this test opens.');
+  return thing.id;
+};
+
+const screens: [name: string, path: string][] = [
+  ['Yard', '/'],
+  ['Traces', '/traces'],
+  ['Traces, none that fit', '/traces?search=nothing-is-called-this'],
+  ['Start a trace', '/traces/new'],
+  ['A signed trace', `/traces/${id(signed)}`],
+  ['Trailers', '/trailers'],
+  ['A trailer', `/trailers/${id(trailer)}`],
+  ['A tank trailer', `/trailers/${id(tank)}`],
+  ['Add a trailer', '/trailers/new'],
+  ['Plans', '/plans'],
+  ['A plan', `/plans/${trailer?.planId ?? ''}`],
+  ['Import a plan', '/plans/import'],
+  ['People', '/people'],
+  ['Account', '/account'],
+  ['No such page', '/nowhere'],
+];
+
+test.describe('signed in as the lead', () => {
+  test.use({ storageState: stateOf(people.lead) });
+
+  for (const theme of themes) {
+    test(`every screen is accessible and fits its window, ${theme}`, async ({ page }) => {
+      test.setTimeout(240_000);
+      await useTheme(page, theme);
+      for (const [name, path] of screens) {
+        await test.step(name, async () => {
+          await page.goto(path);
+          await expect(page.getByRole('heading', { level: 1 })).toBeVisible();
+          await expect(page.locator('[aria-busy="true"]')).toHaveCount(0);
+          for (const size of sizes) {
+            await page.setViewportSize(size);
+            await expectNoSidewaysScroll(page);
+            if (size.width === 1180 || size.width === 390) await expectAccessible(page);
+          }
+        });
+      }
+    });
+  }
+});
+
+for (const theme of themes) {
+  test(`the sign-in is accessible, ${theme}`, async ({ page }) => {
+    await useTheme(page, theme);
+    await page.goto('/');
+    await expect(page.getByRole('heading', { name: 'Sign in' })).toBeVisible();
+    await expect(page.getByRole('button', { name: /^Sign in as/ })).toHaveCount(5);
+    await expectAccessible(page);
+  });
+}
