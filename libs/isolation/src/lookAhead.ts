@@ -1,3 +1,4 @@
+import { choicesOf } from './choices';
 import { exactFinding } from './exact/exactFinding';
 import type { Finding } from './finding';
 import { greedy } from './greedy';
@@ -7,24 +8,36 @@ import { Search, type Allows, type Breadth } from './search';
 import type { Situation, Workbench } from './situation';
 import { Steps, within } from './steps';
 
-/** Above this many cells even one round of playing out every choice takes too long. */
-const MOST_CELLS_TO_SEARCH = 400;
+/** Above this many cells choices are tried by greedy play alone, a few of them. */
+const MOST_CELLS_TO_SEARCH = 100;
+
+/** Above this many cells even that takes too long. */
+const MOST_CELLS_TO_TRY = 2000;
+
+/** Choices tried by greedy play where there are too many cells to search. */
+const TRIED = 6;
+
+/** Cells that the decisions of one play may look at, but for the greedy play, which is always played out. */
+const MOST_LOOKS = 5_000_000;
+
+/** The play that is always known. */
+const greedyPlay = greedy(1);
 
 /** What stands behind a choice while it is ranked. */
-const policies = [greedy(1), greedy(3)];
+const policies = [greedy(3)];
 
-/** Plays that the advice is never worse than, from the first step on. */
-const baselines = [greedy(1), greedy(3), easiestFirst, halfByCount];
+/** Plays that the advice is never worse than, from the first step on, unless they take more than `MOST_LOOKS`. */
+const baselines = [greedy(3), easiestFirst, halfByCount];
 
 /** A glance at every choice of every turn. */
-const glance: Breadth = { mostNew: 4, width: () => 1, exactFrom: 4 };
+const glance: Breadth = { mostNew: 3, width: () => 1, exactFrom: 4 };
 
 /** From looking into a few choices of the first turns to looking into several of all turns. */
 const breadths: Breadth[] = [
-  { mostNew: 4, width: (count) => (count > 20 ? 3 : 1), exactFrom: 5 },
+  { mostNew: 3, width: (count) => (count > 20 ? 3 : 1), exactFrom: 4 },
+  { mostNew: 2, width: () => 3, exactFrom: 5 },
   { mostNew: 4, width: () => 3, exactFrom: 5 },
   { mostNew: 4, width: () => 5, exactFrom: 5 },
-  { mostNew: 4, width: () => 8, exactFrom: 5 },
 ];
 
 /** Seconds by which two sums of the same play may differ. */
@@ -40,22 +53,42 @@ export function lookAhead(
   steps: Steps,
   allows: Allows,
 ): Finding | null {
-  let found: Finding | null = null;
+  let found = playedBy(bench, situation, greedyPlay, allows);
   const offer = (next: Finding | null) => {
     if (next && (!found || next.length.weighted < found.length.weighted)) found = next;
   };
-  for (const policy of baselines) offer(playedBy(bench, situation, policy, allows));
-  if (situation.cells.length > MOST_CELLS_TO_SEARCH) return found;
+  for (const policy of baselines) {
+    offer(
+      within(new Steps(MOST_LOOKS), MOST_LOOKS, (looks) =>
+        playedBy(bench, situation, policy, allows, looks),
+      ),
+    );
+  }
+  const size = situation.cells.length;
+  if (size > MOST_CELLS_TO_SEARCH) {
+    if (size <= MOST_CELLS_TO_TRY)
+      for (const tried of trials(bench, situation, allows)) offer(tried);
+    return found;
+  }
   offer(searched(bench, situation, glance, steps, allows));
-  const known = (found as Finding | null)?.length.weighted ?? Infinity;
+  const known = found?.length.weighted ?? Infinity;
   const exact = exactFinding(bench, situation, known + ROUNDING, steps, steps.left / 2, allows);
   if (exact) return exact;
-  for (const breadth of breadths) {
-    const wider = searched(bench, situation, breadth, steps, allows);
-    if (!wider) break;
-    offer(wider);
-  }
+  for (const breadth of breadths) offer(searched(bench, situation, breadth, steps, allows));
   return found;
+}
+
+/** The choices of the highest rate, with greedy play behind each. O(cells x power-ups) for each. */
+function trials(bench: Workbench, situation: Situation, allows: Allows): Finding[] {
+  return choicesOf(bench, situation, 1)
+    .sort((a, b) => b.rate - a.rate)
+    .slice(0, TRIED)
+    .flatMap(({ open }) => {
+      const step = bench.step(situation, open);
+      if (!step || !allows(step)) return [];
+      const first: Policy = (_, at) => (at === situation ? step : greedyPlay(bench, at));
+      return [{ step, length: playOut(bench, situation, first), optimal: false }];
+    });
 }
 
 /** Several steps worth comparing, best first, each with the length of the play behind it. */
@@ -76,10 +109,11 @@ function playedBy(
   situation: Situation,
   policy: Policy,
   allows: Allows,
+  looks?: Steps,
 ): Finding | null {
   const step = policy(bench, situation);
   if (!allows(step)) return null;
-  return { step, length: playOut(bench, situation, policy), optimal: false };
+  return { step, length: playOut(bench, situation, policy, looks), optimal: false };
 }
 
 function searched(
