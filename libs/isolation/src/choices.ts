@@ -4,12 +4,15 @@ import type { Situation, Workbench } from './situation';
 /** A set of points to have open, with what a glance says of it. */
 export interface Choice {
   open: readonly number[];
-  /** Bits expected from the reading for each expected second; 0 when the reading would tell nothing. */
+  /** Bits expected from the reading for each expected second. */
   rate: number;
 }
 
 /** So many of the best first points are looked at together with further ones. */
 const GROWN = 8;
+
+/** What costs no time still counts for so many seconds, so that rates can be compared. */
+const SHORTEST = 1e-6;
 
 /** The choice that the greedy play makes: points are added as long as that raises the rate. O(cells x mostNew). */
 export function greedyChoice(
@@ -24,8 +27,7 @@ export function greedyChoice(
     return true;
   };
   for (const base of basesOf(bench, situation)) {
-    const start = { open: base, rate: rateOf(bench, situation, base) };
-    if (start.rate > 0) offer(start);
+    offer(asItIs(bench, situation, base));
     let grown = bestExtension(bench, situation, base);
     for (let more = 1; offer(grown) && grown && more < mostNew; more += 1) {
       grown = bestExtension(bench, situation, grown.open);
@@ -41,8 +43,8 @@ export function greedyChoice(
 export function choicesOf(bench: Workbench, situation: Situation, mostNew: number): Choice[] {
   const found: Choice[] = [];
   for (const base of basesOf(bench, situation)) {
-    const start = rateOf(bench, situation, base);
-    if (start > 0) found.push({ open: base, rate: start });
+    const start = asItIs(bench, situation, base);
+    if (start) found.push(start);
     const firsts: Choice[] = [];
     visitExtensions(bench, situation, base, (v, rate) => {
       firsts.push({ open: withPoint(base, v), rate });
@@ -60,11 +62,16 @@ export function choicesOf(bench: Workbench, situation: Situation, mostNew: numbe
   return found;
 }
 
-function rateOf(bench: Workbench, situation: Situation, open: readonly number[]): number {
+/** The choice to leave just these points open, when its reading would tell anything. */
+function asItIs(
+  bench: Workbench,
+  situation: Situation,
+  open: readonly number[],
+): Choice | undefined {
   const step = bench.step(situation, open);
-  if (!step) return 0;
+  if (!step) return undefined;
   const share = step.onOverload.weight / situation.weight;
-  return bits(share) / (step.seconds + share * bench.cells.overloadSeconds);
+  return { open, rate: rateOf(share, step.seconds + share * bench.cells.overloadSeconds) };
 }
 
 function bestExtension(
@@ -73,7 +80,7 @@ function bestExtension(
   base: readonly number[],
 ): Choice | undefined {
   let best = -1;
-  let highest = 0;
+  let highest = -1;
   visitExtensions(bench, situation, base, (v, rate) => {
     if (rate <= highest) return;
     highest = rate;
@@ -113,7 +120,7 @@ function visitExtensions(
     if (v === 0 || beyond === 0 || beyond === count || situation.open.includes(v)) continue;
     const share = (lit - (bench.beyond[v] ?? 0)) / situation.weight;
     const effort = seconds + (hands[v] ?? 0) + Math.max(farthest, walk[v] ?? 0);
-    visit(v, bits(share) / (effort + share * overloadSeconds));
+    visit(v, rateOf(share, effort + share * overloadSeconds));
   }
 }
 
@@ -123,8 +130,9 @@ function withPoint(base: readonly number[], v: number): number[] {
   return at < 0 ? [...base, v] : [...base.slice(0, at), v, ...base.slice(at)];
 }
 
-/** Entropy of a reading that is an overload with this probability, in bits. */
-function bits(share: number): number {
+/** Bits a second of a reading that is an overload with this probability; none where rounding makes it certain. */
+function rateOf(share: number, seconds: number): number {
   if (share <= 0 || share >= 1) return 0;
-  return -share * Math.log2(share) - (1 - share) * Math.log2(1 - share);
+  const bits = -share * Math.log2(share) - (1 - share) * Math.log2(1 - share);
+  return bits / Math.max(seconds, SHORTEST);
 }
