@@ -62,16 +62,23 @@ function Row({ part, label, words, marks, onPick }: RowProps) {
           ink={1}
         />
       </svg>
-      <span>{label}</span>
-      {words && (
-        <span className="lw-list-words" style={{ color: colours.muted }}>
-          {words}
-        </span>
-      )}
+      <span className="lw-list-text">
+        <span>{label}</span>
+        {words && (
+          <span className="lw-list-words" style={{ color: colours.muted }}>
+            {words}
+          </span>
+        )}
+      </span>
     </>
   );
   return onPick ? (
-    <button type="button" className="lw-list-row" onClick={() => onPick(part.id)}>
+    <button
+      type="button"
+      className="lw-list-row"
+      style={{ borderColor: colours.edge }}
+      onClick={() => onPick(part.id)}
+    >
       {face}
     </button>
   ) : (

@@ -22,7 +22,7 @@ export function labelSurroundings(input: Input): Omit<LabelSurroundings, 'size'>
   const { layout, texts, ink, dimensionY } = input;
   const { sheet, frame } = layout;
   const { deck } = frame;
-  const scaleRow = { x: 0, y: sheet.height - 18, width: sheet.width, height: 18 };
+  const scaleRow = { x: 0, y: sheet.height - 26, width: sheet.width, height: 26 };
   const dimension =
     dimensionY === null ? [] : [{ x: deck.x, y: dimensionY - 8, width: deck.width, height: 16 }];
   const wires = wireBoxes(layout, 2.5 * ink).map((box) => ({ box, cost: WIRE }));

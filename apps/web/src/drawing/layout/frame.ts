@@ -31,7 +31,7 @@ export interface FaceWidths {
 }
 
 /** A trailer is far longer than wide; across it may be drawn this many times wider than along. */
-const MOST_STRETCH = 3;
+const MOST_STRETCH = 3.5;
 
 /** Fits the trailer into the sheet: to one scale along, to another across where that reads better. */
 export function frameOf(extent: Extent, sheet: Size, margins: Margins, faces: FaceWidths): Frame {

@@ -85,7 +85,7 @@ function marginsOf(sheet: Size, compact: boolean): Margins {
   const side = compact ? 8 : clamp(sheet.width * 0.035, 21, 30);
   if (compact) return { top: 32, right: side, bottom: 10, left: side };
   const top = clamp(sheet.height * 0.16, 40, 84);
-  return { top, right: side, bottom: clamp(sheet.height * 0.18, 40, 92), left: side };
+  return { top, right: side, bottom: clamp(sheet.height * 0.18, 48, 92), left: side };
 }
 
 function largestSymbol(sheet: Size): number {

@@ -74,6 +74,15 @@ export const Stack = chakra('div', {
   base: { display: 'flex', flexDirection: 'column', gap: 'touch' },
 });
 
+/** The answers to a question: one under the other, in portrait side by side, so that the drawing keeps its room. */
+export const TwoAnswers = chakra('div', {
+  base: {
+    display: 'grid',
+    gap: 'touch',
+    gridTemplateColumns: { base: '1fr', md: '1fr 1fr', lg: '1fr' },
+  },
+});
+
 /** Choices of equal width, two on a line. */
 export const Pairs = chakra('div', {
   base: { display: 'grid', gridTemplateColumns: '1fr 1fr', gap: 'touch' },

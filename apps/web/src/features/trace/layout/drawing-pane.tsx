@@ -23,15 +23,22 @@ const Pane = chakra('div', {
   },
 });
 const Picture = chakra('div', {
-  base: { flex: '1', minHeight: { base: '130px', md: '0' }, height: { base: '130px', md: 'auto' } },
+  base: { flex: '1', minHeight: { base: '130px', md: '0' } },
+  variants: { form: { drawing: { height: { base: '130px', md: 'auto' } }, list: {} } },
 });
 const Foot = chakra('div', {
-  base: { display: 'flex', alignItems: 'center', justifyContent: 'flex-end', gap: 'touch' },
+  base: {
+    display: 'flex',
+    flexDirection: { base: 'row', lg: 'column' },
+    alignItems: { base: 'center', lg: 'stretch' },
+    justifyContent: 'flex-end',
+    gap: { base: 'touch', lg: '1.5' },
+  },
 });
 const Legend = chakra('p', {
   base: {
     display: 'flex',
-    flex: '1',
+    flex: { base: '1', md: 'none' },
     paddingX: { base: '2', md: '0' },
     flexWrap: 'wrap',
     columnGap: '5',
@@ -68,7 +75,7 @@ export function DrawingPane() {
   );
   return (
     <Pane role="group" aria-label={t('page.drawing')}>
-      <Picture>
+      <Picture form={form}>
         <PlanView
           form={form}
           onForm={setForm}
@@ -81,9 +88,9 @@ export function DrawingPane() {
           {...picking}
         />
       </Picture>
-      {hunted && !phone && <SuspicionBar slices={slices} />}
       {(hunted || phone) && (
         <Foot>
+          {hunted && !phone && <SuspicionBar slices={slices} />}
           {hunted && (
             <Legend>
               <span>{t('narrow.inQuestion', { count: inQuestion })}</span>

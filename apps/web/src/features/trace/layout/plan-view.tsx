@@ -8,7 +8,17 @@ export type PlanForm = 'drawing' | 'list';
 
 const Unseen = chakra('div', { base: { srOnly: true } });
 const Rows = chakra('div', {
-  base: { flex: '1', minHeight: '0', overflowY: 'auto', borderWidth: '1px', borderColor: 'line' },
+  base: {
+    flex: '1',
+    minHeight: '0',
+    maxHeight: { base: '40dvh', md: 'none' },
+    overflowY: 'auto',
+    bg: 'bg.panel',
+    borderRadius: 'md',
+    padding: '1.5',
+    borderWidth: '1px',
+    borderColor: 'line',
+  },
 });
 const Tools = chakra('div', {
   base: { display: 'flex', justifyContent: 'flex-end', paddingX: '2', paddingY: '1' },

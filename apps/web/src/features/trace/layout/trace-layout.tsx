@@ -36,7 +36,7 @@ const Side = chakra('main', {
     gridArea: 'panel',
     minWidth: '0',
     minHeight: '0',
-    maxHeight: { md: '62dvh', lg: 'none' },
+    maxHeight: { md: '54dvh', lg: 'none' },
     display: 'flex',
     flexDirection: 'column',
     bg: 'bg.panel',

@@ -1,7 +1,7 @@
 import type { Feed, Seen } from '@lampwright/trace';
 import type { ReactNode } from 'react';
 import { AnswerButton } from '../controls/answer-button';
-import { PanelAnswers, PanelMore } from '../controls/panel';
+import { PanelAnswers, PanelMore, TwoAnswers } from '../controls/panel';
 import { useTraceWords } from '../words/use-trace-words';
 
 interface ReadingAnswersProps {
@@ -27,18 +27,20 @@ export function ReadingAnswers(props: ReadingAnswersProps) {
     <>
       <PanelAnswers>
         {ask}
-        <AnswerButton
-          tone="overload"
-          label={t(`feed.${feed.kind}.overload`)}
-          {...(about.overload ? { about: about.overload } : {})}
-          onTap={() => onAnswer('overload')}
-        />
-        <AnswerButton
-          tone="holds"
-          label={t(`feed.${feed.kind}.holds`)}
-          {...(about.holds ? { about: about.holds } : {})}
-          onTap={() => onAnswer('holds')}
-        />
+        <TwoAnswers>
+          <AnswerButton
+            tone="overload"
+            label={t(`feed.${feed.kind}.overload`)}
+            {...(about.overload ? { about: about.overload } : {})}
+            onTap={() => onAnswer('overload')}
+          />
+          <AnswerButton
+            tone="holds"
+            label={t(`feed.${feed.kind}.holds`)}
+            {...(about.holds ? { about: about.holds } : {})}
+            onTap={() => onAnswer('holds')}
+          />
+        </TwoAnswers>
       </PanelAnswers>
       <PanelMore>
         <AnswerButton

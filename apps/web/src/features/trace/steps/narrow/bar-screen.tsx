@@ -1,11 +1,12 @@
 import type { PartId } from '@lampwright/harness';
 import type { BarReason } from '@lampwright/trace';
-import { useState } from 'react';
+import { useMemo, useState } from 'react';
 import { AnswerButton } from '../../controls/answer-button';
 import { ChoiceCard } from '../../controls/choice-card';
 import { FieldButton } from '../../controls/field-button';
 import { Ask, Panel, PanelAnswers, PanelBody, Small, Stack } from '../../controls/panel';
 import { StepHeading } from '../../controls/step-heading';
+import { useShowOnDrawing } from '../../layout/overlay';
 import { useRecord } from '../../store/trace-session';
 import { useNames } from '../../words/use-names';
 import { useTraceWords } from '../../words/use-trace-words';
@@ -26,6 +27,7 @@ export function BarScreen({ points, plan = false, back }: BarScreenProps) {
   const names = useNames();
   const record = useRecord();
   const [point, setPoint] = useState(points.length === 1 ? points[0] : undefined);
+  useShowOnDrawing(useMemo(() => (plan ? {} : { cut: points }), [plan, points]));
   const bar = async (reason: BarReason) => {
     if (point === undefined) return;
     await record({ type: 'point.barred', point, reason });
