@@ -64,7 +64,7 @@ export function cutsOf(input: Input): Cut[] {
       const stroke: Cut['stroke'] = [near, { x: at.x, y: at.y - out * long }];
       return [{ ...common, edge, stroke, leader: [near, { x: at.x, y: start }] }];
     }
-    const side = freerSide(at, screen, symbol, deck);
+    const side = freerSide(at, screen, symbol, deck, edge);
     const near = { x: at.x + side * long, y: at.y };
     const stroke: Cut['stroke'] = [near, { x: at.x - side * long, y: at.y }];
     return [{ ...common, edge, stroke, leader: [near, { x: near.x, y: start }] }];
@@ -98,16 +98,19 @@ function strokeBefore(at: Point, turn: number, symbol: number): Cut['stroke'] {
   ];
 }
 
-/** The side on which a line up or down beside the part passes fewer others; the front where it is the same. */
+/** The side on which the line from the flag passes, or ends on, fewer others; the front where it is the same. */
 function freerSide(
   at: Point,
   screen: ReadonlyMap<PartId, Point>,
   symbol: number,
   deck: Box,
+  edge: FlagEdge,
 ): 1 | -1 {
+  const near = symbol * 0.7;
+  const onTheWay = (y: number) => (edge === 'top' ? y < at.y + near : y > at.y - near);
   const passed = (side: 1 | -1) =>
     [...screen.values()].filter(
-      (other) => Math.abs(other.x - at.x - side * symbol * REACH) < symbol * 0.7,
+      (other) => onTheWay(other.y) && Math.abs(other.x - at.x - side * symbol * REACH) < near,
     ).length;
   if (at.x - symbol * REACH < deck.x) return 1;
   return passed(1) < passed(-1) ? 1 : -1;

@@ -89,6 +89,15 @@ describe('cutsOf', () => {
     expect(cut!.stroke[1].y).toBe(200);
   });
 
+  it('has its line come down on the side where no other part is in its way', () => {
+    const cutBeside = (x: number) => {
+      const beside = new Map([...screen, ['b', { x, y: 200 }] as const]);
+      return cutsOf({ ...base, parts, cut: ['p'], screen: beside, turn: () => 90 })[0]!;
+    };
+    expect(cutBeside(270).leader.at(-1)!.x).toBeGreaterThan(300);
+    expect(cutBeside(330).leader.at(-1)!.x).toBeLessThan(300);
+  });
+
   it('is short where another part is in line with it', () => {
     const [cut] = cutsOf({ ...base, parts, cut: ['b'], screen, turn: () => 0 });
     expect(Math.abs(cut!.stroke[0].y - cut!.stroke[1].y)).toBeLessThan(80);
