@@ -25,7 +25,11 @@ export function huffmanLength(weights: Iterable<number>): number {
 
 /** Entropy of the weights after division by their sum, in bits. O(n). */
 export function entropyBits(weights: Iterable<number>): number {
-  const positive = [...weights].filter((weight) => weight > 0);
-  const sum = positive.reduce((total, weight) => total + weight, 0);
-  return positive.reduce((bits, weight) => bits - (weight / sum) * Math.log2(weight / sum), 0);
+  const all = [...weights];
+  const sum = all.reduce((total, weight) => total + weight, 0);
+  // A weight far below the others may be no share at all once it is rounded.
+  return all.reduce((bits, weight) => {
+    const share = weight / sum;
+    return share > 0 ? bits - share * Math.log2(share) : bits;
+  }, 0);
 }

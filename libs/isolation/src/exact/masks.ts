@@ -61,12 +61,13 @@ export function bitsOf(mask: number): number[] {
 function sistersBefore({ size, parent, weight, hands }: Cells): Int32Array {
   const isLeaf = new Uint8Array(size).fill(1);
   for (let v = 1; v < size; v += 1) isLeaf[parent[v] ?? 0] = 0;
+  // One number each, so that rounding cannot make the order go round in a circle.
+  const worth = Float64Array.from(weight, (share, v) => (hands[v] ? share / hands[v] : Infinity));
   const before = new Int32Array(size);
   for (let v = 1; v < size; v += 1) {
     for (let other = 1; other < size; other += 1) {
       if (other === v || !isLeaf[v] || !isLeaf[other] || parent[v] !== parent[other]) continue;
-      const own = (weight[v] ?? 0) * (hands[other] ?? 0);
-      const its = (weight[other] ?? 0) * (hands[v] ?? 0);
+      const [own, its] = [worth[v] ?? 0, worth[other] ?? 0];
       if (its > own || (its === own && other < v)) before[v] = (before[v] ?? 0) | (1 << other);
     }
   }
