@@ -55,7 +55,12 @@ export class TraceWalk {
   async start(): Promise<void> {
     await this.page.goto('/');
     await this.page.getByRole('link', { name: /^Start a trace/ }).tap();
-    await this.page.getByRole('radio', { name: new RegExp(`^${this.trailer.unit}`) }).tap();
+    const unit = this.page.getByRole('radio', { name: new RegExp(`^${this.trailer.unit}`) });
+    // The list may still grow under the finger while it loads; a person taps again.
+    await expect(async () => {
+      await unit.tap();
+      await expect(unit).toBeChecked({ timeout: 1_000 });
+    }).toPass();
     await this.tap(`Start on unit ${this.trailer.unit}`);
     await expect(this.title).toHaveText('What is the complaint?');
   }

@@ -11,7 +11,7 @@ import { usePhone } from './use-phone';
 import { useMarks } from './use-marks';
 import { useSlices } from './use-slices';
 
-const Pane = chakra('div', {
+const Pane = chakra('section', {
   base: {
     display: 'flex',
     flexDirection: 'column',
@@ -74,7 +74,7 @@ export function DrawingPane() {
     [overlay.onPick, overlay.pickable],
   );
   return (
-    <Pane role="group" aria-label={t('page.drawing')}>
+    <Pane aria-label={t('page.drawing')}>
       <Picture form={form}>
         <PlanView
           form={form}
