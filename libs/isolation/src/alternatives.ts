@@ -1,8 +1,10 @@
-import type { PartId } from '@lampwright/harness';
+import type { PartId, SeparablePoint } from '@lampwright/harness';
 import { adviceOf } from './advice';
 import type { Cells } from './cells';
 import { candidates } from './lookAhead';
+import type { Allows } from './search';
 import { openingSituation, Workbench } from './situation';
+import { tellsMore } from './tellsMore';
 import type { Advice, Question } from './types';
 
 /** Another power-up in place of the proposed one. */
@@ -16,26 +18,44 @@ export interface Alternative {
   extraSeconds: number;
 }
 
-/** The best power-ups that open other points than the advice does, best first. About the time of one plan. */
+/**
+ * The best power-ups that open other points, best first: neither all of the advice's and more, nor only some of them.
+ * About the time of one plan.
+ */
 export function alternativesTo(
   question: Question,
   cells: Cells,
   advice: Advice,
   most: number,
 ): Alternative[] {
-  const bench = new Workbench(cells);
+  const tells = tellsMore(question, cells);
   const proposed = new Set(advice.open);
-  const others: Alternative[] = [];
-  for (const found of candidates(bench, openingSituation(cells), 3 * most)) {
-    const other = adviceOf(question, cells, found);
-    const { open, toOpen, toClose, overloadProbability, expectedSeconds } = other;
-    if (open.every((id) => proposed.has(id)) || advice.open.every((id) => open.includes(id))) {
-      continue;
-    }
-    // The same play may be looked into less deeply as an alternative than as the advice.
+  const opensOthers: Allows = (step) => {
+    const ids = step.open.flatMap((cell) => cells.points[cell]?.partId ?? []);
+    return ids.some((id) => !proposed.has(id)) && cells.points.some(isProposedBut(ids, proposed));
+  };
+  const found = candidates(
+    new Workbench(cells),
+    openingSituation(cells),
+    2 * most,
+    (step) => tells(step) && opensOthers(step),
+  );
+  return found.slice(0, most).map((finding) => {
+    const { open, toOpen, toClose, overloadProbability, expectedSeconds } = adviceOf(
+      question,
+      cells,
+      finding,
+    );
+    // The same play may be looked into less deeply behind the advice than behind an alternative.
     const extraSeconds = Math.max(0, expectedSeconds - advice.expectedSeconds);
-    others.push({ open, toOpen, toClose, overloadProbability, expectedSeconds, extraSeconds });
-    if (others.length === most) break;
-  }
-  return others;
+    return { open, toOpen, toClose, overloadProbability, expectedSeconds, extraSeconds };
+  });
+}
+
+/** Whether a useful point is open in the advice and not among these. */
+function isProposedBut(
+  ids: readonly PartId[],
+  proposed: ReadonlySet<PartId>,
+): (point: SeparablePoint | null) => boolean {
+  return (point) => point !== null && proposed.has(point.partId) && !ids.includes(point.partId);
 }

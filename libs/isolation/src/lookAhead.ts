@@ -29,15 +29,15 @@ const policies = [greedy(3)];
 /** Plays that the advice is never worse than, from the first step on, unless they take more than `MOST_LOOKS`. */
 const baselines = [greedy(3), easiestFirst, halfByCount];
 
-/** A glance at every choice of every turn. */
-const glance: Breadth = { mostNew: 3, width: () => 1, exactFrom: 4 };
+/** Several first steps, and behind each the one that looks best at every turn. */
+const glance: Breadth = { first: 6, mostNew: 3, width: () => 1, exactFrom: 4 };
 
-/** From looking into a few choices of the first turns to looking into several of all turns. */
+/** From looking into a few choices of the next turns to looking into several of all turns. */
 const breadths: Breadth[] = [
-  { mostNew: 3, width: (count) => (count > 20 ? 3 : 1), exactFrom: 4 },
-  { mostNew: 2, width: () => 3, exactFrom: 5 },
-  { mostNew: 4, width: () => 3, exactFrom: 5 },
-  { mostNew: 4, width: () => 5, exactFrom: 5 },
+  { first: 3, mostNew: 3, width: (count) => (count > 20 ? 3 : 1), exactFrom: 4 },
+  { first: 3, mostNew: 2, width: () => 3, exactFrom: 5 },
+  { first: 3, mostNew: 4, width: () => 3, exactFrom: 5 },
+  { first: 5, mostNew: 4, width: () => 5, exactFrom: 5 },
 ];
 
 /** Seconds by which two sums of the same play may differ. */
@@ -66,15 +66,15 @@ export function lookAhead(
   }
   const size = situation.cells.length;
   if (size > MOST_CELLS_TO_SEARCH) {
-    if (size <= MOST_CELLS_TO_TRY)
-      for (const tried of trials(bench, situation, allows)) offer(tried);
+    const tried = size <= MOST_CELLS_TO_TRY ? trials(bench, situation, allows) : [];
+    tried.forEach(offer);
     return found;
   }
-  offer(searched(bench, situation, glance, steps, allows));
+  lookInto(bench, situation, glance, steps, allows, offer);
   const known = found?.length.weighted ?? Infinity;
   const exact = exactFinding(bench, situation, known + ROUNDING, steps, steps.left / 2, allows);
   if (exact) return exact;
-  for (const breadth of breadths) offer(searched(bench, situation, breadth, steps, allows));
+  for (const breadth of breadths) lookInto(bench, situation, breadth, steps, allows, offer);
   return found;
 }
 
@@ -91,17 +91,22 @@ function trials(bench: Workbench, situation: Situation, allows: Allows): Finding
     });
 }
 
-/** Several steps worth comparing, best first, each with the length of the play behind it. */
-export function candidates(bench: Workbench, situation: Situation, most: number): Finding[] {
-  const search = new Search(
-    bench,
-    policies,
-    { mostNew: 2, width: () => 1, exactFrom: 5 },
-    new Steps(Infinity),
-  );
-  return search
-    .candidates(situation, most, () => true)
-    .map((played) => ({ ...played, optimal: false }));
+/** Several allowed steps worth comparing, best first, each with the length of the play behind it. */
+export function candidates(
+  bench: Workbench,
+  situation: Situation,
+  most: number,
+  allows: Allows,
+): Finding[] {
+  if (situation.cells.length > MOST_CELLS_TO_SEARCH) {
+    return trials(bench, situation, allows)
+      .sort((a, b) => a.length.weighted - b.length.weighted)
+      .slice(0, most);
+  }
+  const found: Finding[] = [];
+  const breadth = { ...glance, first: most };
+  lookInto(bench, situation, breadth, new Steps(Infinity), allows, (next) => found.push(next));
+  return found.sort((a, b) => a.length.weighted - b.length.weighted);
 }
 
 function playedBy(
@@ -116,15 +121,20 @@ function playedBy(
   return { step, length: playOut(bench, situation, policy, looks), optimal: false };
 }
 
-function searched(
+/** Offers every step that a search has looked into before the steps were spent. */
+function lookInto(
   bench: Workbench,
   situation: Situation,
   breadth: Breadth,
   steps: Steps,
   allows: Allows,
-): Finding | null {
-  return within(steps, steps.left, (left) => {
-    const best = new Search(bench, policies, breadth, left).best(situation, allows);
-    return best && { ...best, optimal: false };
+  offer: (found: Finding) => void,
+): void {
+  within(steps, steps.left, (left) => {
+    const search = new Search(bench, policies, breadth, left);
+    search.lookInto(situation, breadth.first, allows, (played) => {
+      offer({ ...played, optimal: false });
+    });
+    return null;
   });
 }

@@ -7,9 +7,11 @@ import type { Steps } from './steps';
 
 /** How widely a search looks. */
 export interface Breadth {
+  /** How many first steps are looked into. */
+  first: number;
   /** At most so many points opened for one power-up. */
   mostNew: number;
-  /** How many choices are looked into, by the number of cells in question. */
+  /** How many choices are looked into at a later turn, by the number of cells in question. */
   width: (count: number) => number;
   /** From so many cells in question downwards the best play is searched out. */
   exactFrom: number;
@@ -42,24 +44,21 @@ export class Search {
     this.basic = policies.map(() => new Map());
   }
 
-  /** The best step found among the allowed ones, its play counted to the end, closing included. */
-  best(situation: Situation, allows: Allows = () => true): Played | null {
-    let best: Played | null = null;
-    for (const { step } of this.ranked(situation, this.breadth.width(situation.count), allows)) {
-      const length = this.after(situation, step, (next) => this.value(next));
-      if (!best || length.weighted < best.length.weighted) best = { step, length };
+  /**
+   * Looks into the `most` best ranked of the allowed steps, one after the other, and tells of each how long the play
+   * behind it is, closing included.
+   *
+   * @throws StepsSpent when the steps do not suffice; what was told until then holds.
+   */
+  lookInto(
+    situation: Situation,
+    most: number,
+    allows: Allows,
+    tell: (played: Played) => void,
+  ): void {
+    for (const { step } of this.ranked(situation, most, allows)) {
+      tell({ step, length: this.after(situation, step, (next) => this.value(next)) });
     }
-    return best;
-  }
-
-  /** The most promising steps, each with the length of the best play found behind it; at most `most`, best first. */
-  candidates(situation: Situation, most: number, allows: Allows): Played[] {
-    return this.ranked(situation, most, allows)
-      .map(({ step }) => ({
-        step,
-        length: this.after(situation, step, (next) => this.value(next)),
-      }))
-      .sort((a, b) => a.length.weighted - b.length.weighted);
   }
 
   private value(situation: Situation): Length {
@@ -68,9 +67,19 @@ export class Search {
     const key = keyOf(situation);
     const known = this.values.get(key);
     if (known) return known;
-    const length = this.best(situation)?.length ?? this.end(situation);
-    this.values.set(key, length);
-    return length;
+    let best = this.end(situation);
+    let first = true;
+    this.lookInto(
+      situation,
+      this.breadth.width(situation.count),
+      () => true,
+      ({ length }) => {
+        if (first || length.weighted < best.weighted) best = length;
+        first = false;
+      },
+    );
+    this.values.set(key, best);
+    return best;
   }
 
   private ranked(situation: Situation, most: number, allows: Allows): Played[] {
