@@ -51,7 +51,7 @@ test.describe('signed in as the lead', () => {
           for (const size of sizes) {
             await page.setViewportSize(size);
             await expectNoSidewaysScroll(page);
-            if (size.width === 1180 || size.width === 390) await expectAccessible(page);
+            if (size.width === 1180) await expectAccessible(page);
           }
         });
       }
