@@ -24,7 +24,7 @@ module.exports = {
       'libs/harness',
     ]),
     only('demo-knows-the-libs', 'libs/demo', ['libs/trace', 'libs/isolation', 'libs/harness']),
-    only('web-knows-no-api', 'apps/web', [
+    only('web-knows-no-api', 'apps/web/', [
       'libs/contracts',
       'libs/trace',
       'libs/isolation',

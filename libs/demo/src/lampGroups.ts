@@ -7,7 +7,7 @@ import type { LampFunction } from './lampAmps';
 import type { Feeder } from './nodes';
 
 /** `turn` stands for the turn circuit of the lamp's own side. */
-export type SideFeeds = Partial<Record<LampFunction, Wire | 'turn'>>;
+type SideFeeds = Partial<Record<LampFunction, Wire | 'turn'>>;
 
 export interface LampPair {
   id: PartId;

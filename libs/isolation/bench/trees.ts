@@ -1,7 +1,7 @@
 import type { Section, SectionTree } from '@lampwright/harness';
 
 /** Numbers from 0 to 1 that look random and are the same each time (Park and Miller 1988). */
-export function sequence(seed: number): () => number {
+function sequence(seed: number): () => number {
   let state = seed;
   return () => {
     state = (state * 48271) % 2147483647;

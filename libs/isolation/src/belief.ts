@@ -9,7 +9,7 @@ import type { Belief, BeliefOptions, Reading } from './types';
 export const ANOTHER_SHORT_FACTOR = 0.2;
 
 /** Above this many kinds of section, three shorts are looked at as two: the sum over triples would take too long. */
-export const MOST_KINDS_FOR_THREE = 150;
+const MOST_KINDS_FOR_THREE = 150;
 
 /**
  * Bayes' rule, exact, over every set of 1 to `maxFaults` sections. A set weighs the product of its sections'
@@ -46,7 +46,7 @@ export function believe(
 }
 
 /** Indices of the sections with a probability above 0, most likely first, equal ones in section order. */
-export function mostLikelyFirst(probabilities: readonly number[]): number[] {
+function mostLikelyFirst(probabilities: readonly number[]): number[] {
   return [...probabilities.keys()]
     .filter((index) => (probabilities[index] ?? 0) > 0)
     .sort((a, b) => (probabilities[b] ?? 0) - (probabilities[a] ?? 0) || a - b);

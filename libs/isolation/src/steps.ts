@@ -1,5 +1,5 @@
 /** Thrown inside a search that has used up its steps, and caught by whoever set the limit. */
-export class StepsSpent extends Error {}
+class StepsSpent extends Error {}
 
 /** How much a search may still do. Counted, not timed, so that the same question gives the same answer everywhere. */
 export class Steps {

@@ -10,7 +10,7 @@ import type { FieldProblem, Problem, ProblemReason } from '@lampwright/contracts
 import { PROBLEMS } from './messages';
 
 /** One field at fault, as the OpenAPI document shows it. */
-export class FieldProblemDto implements FieldProblem {
+class FieldProblemDto implements FieldProblem {
   @ApiProperty()
   path: string;
 
@@ -25,7 +25,7 @@ export class FieldProblemDto implements FieldProblem {
 }
 
 /** Every error, as the OpenAPI document shows it. */
-export class ProblemDto implements Problem {
+class ProblemDto implements Problem {
   @ApiProperty({ example: 'urn:lampwright:problem:notFound' })
   type: string;
 

@@ -8,7 +8,7 @@ import { assertConnection } from './assert-connection';
 import { migrate } from './migrate';
 import { ormConfig } from './orm.config';
 
-export const DATABASE_FILE = 'lampwright.sqlite';
+const DATABASE_FILE = 'lampwright.sqlite';
 
 /** Opens the database and brings it up to date before anything else asks it. */
 @Module({})

@@ -1,13 +1,4 @@
 export { HarnessDrawing } from './harness-drawing';
 export { HarnessList } from './harness-list';
 export { SuspicionBar } from './suspicion-bar';
-export type {
-  DrawingMarks,
-  DrawingTrailer,
-  HarnessDrawingProps,
-  HarnessListProps,
-  LengthUnit,
-  PlaceMark,
-  SuspicionBarProps,
-  SuspicionSlice,
-} from './marks';
+export type { DrawingMarks, HarnessDrawingProps, PlaceMark } from './marks';

@@ -1,6 +1,6 @@
 import type { Problem, ProblemReason } from '@lampwright/contracts';
 
-export interface Call {
+interface Call {
   method: string;
   /** Path below /api, with the query. */
   path: string;

@@ -21,7 +21,7 @@ const Fault = chakra('p', {
 });
 
 /** What ties a control to its label, its hint and its error. */
-export interface ControlAria {
+interface ControlAria {
   id: string;
   'aria-describedby'?: string;
   'aria-invalid'?: true;

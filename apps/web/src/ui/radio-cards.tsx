@@ -48,7 +48,7 @@ const Note = chakra('span', {
   base: { display: 'block', fontWeight: 'normal', color: 'fg.muted', fontSize: 'md', mt: '0.5' },
 });
 
-export interface RadioChoice<T extends string> {
+interface RadioChoice<T extends string> {
   value: T;
   label: ReactNode;
   hint?: ReactNode;

@@ -12,7 +12,7 @@ import {
 import { checkEach, checkShape } from './shapeFaults';
 
 /** What could be made out of one thing, well shaped or not; what has the wrong shape is left out. */
-export interface CircuitDraft {
+interface CircuitDraft {
   path: string;
   id?: string | undefined;
 }

@@ -8,7 +8,7 @@ export const COPPER_OHM_METRES = 1.7241e-8;
 export const COPPER_CONSTANT = 234.5;
 
 /** Change of copper's resistance for each kelvin, of its value at 20 °C. From memory; 1 / (234.5 + 20) = 0.00393. */
-export const COPPER_PER_KELVIN = 0.00393;
+const COPPER_PER_KELVIN = 0.00393;
 
 const METRES_PER_FOOT = 0.3048;
 

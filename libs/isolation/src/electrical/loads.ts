@@ -7,7 +7,7 @@ import { loadsOf, type CircuitId, type Harness, type Part } from '@lampwright/ha
 export const COLD_FILAMENT = { least: 0.08, usual: 0.1, most: 0.12 } as const;
 
 /** Amps that the part draws from the circuit at nominal voltage. */
-export function ampsOf(part: Part, circuit: CircuitId): number {
+function ampsOf(part: Part, circuit: CircuitId): number {
   return loadsOf(part).reduce((sum, load) => sum + (load.circuit === circuit ? load.amps : 0), 0);
 }
 

@@ -11,7 +11,7 @@ export interface NetworkModel {
 }
 
 /** A piece of a run as it lies in the tree. */
-export interface Branch {
+interface Branch {
   piece: Piece;
   /** The node it feeds, seen from the root. */
   node: number;

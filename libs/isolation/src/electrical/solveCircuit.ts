@@ -32,7 +32,7 @@ export interface CircuitSolution {
 }
 
 /** The least ohms that a contact is taken to have: below a micro-ohm it changes nothing and would divide by zero. */
-export const LEAST_CONTACT_OHMS = 1e-6;
+const LEAST_CONTACT_OHMS = 1e-6;
 
 /**
  * Solves one circuit under power: lamps as the resistances they are at nominal voltage, wires as the plan draws them,

@@ -67,10 +67,7 @@ export function withPowerUp(context: TraceContext, powerUp: PowerUp): TraceConte
 }
 
 /** What is wrong with the readings once this one is among them. */
-export function contradictionAfter(
-  context: TraceContext,
-  powerUp: PowerUp,
-): ContradictionKind | null {
+function contradictionAfter(context: TraceContext, powerUp: PowerUp): ContradictionKind | null {
   if (powerUp.seen === 'holds' && isAllConnected(context, powerUp)) return 'holdsAllConnected';
   return situation(context)?.belief.contradicted ? 'nothingLeft' : null;
 }

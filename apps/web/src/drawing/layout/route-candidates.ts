@@ -1,7 +1,7 @@
 import type { Point } from './geometry';
 
 /** Distance between wires that run side by side, pixels. */
-export const TRACK = 5;
+const TRACK = 5;
 
 /**
  * The ways a run may be drawn from one part to another, all of level and upright pieces: straight, with one bend, and

@@ -1,7 +1,7 @@
 import type { LengthUnit } from '../marks';
 
 /** One foot; exact by the international agreement of 1959. */
-export const METRES_IN_A_FOOT = 0.3048;
+const METRES_IN_A_FOOT = 0.3048;
 
 export interface ScaleBar {
   /** Length of the whole bar in its unit. */

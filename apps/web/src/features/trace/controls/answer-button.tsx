@@ -3,7 +3,7 @@ import { Answer } from '../../../ui';
 import type { ButtonProps } from '../../../ui/button';
 import { useGuardedTap } from './tap-guard';
 
-export type AnswerTone = 'overload' | 'holds' | 'plain';
+type AnswerTone = 'overload' | 'holds' | 'plain';
 
 interface AnswerButtonProps {
   tone: AnswerTone;

@@ -19,5 +19,3 @@ export function useTraceDraft<Value>(
   }, [typed, save]);
   return { value: typed ?? kept ?? initial, ready, set: setTyped, clear };
 }
-
-export const readText = (kept: unknown): string | null => (typeof kept === 'string' ? kept : null);

@@ -46,5 +46,3 @@ export function fakeTraceServer(record: TraceRecord) {
   };
   return server;
 }
-
-export type FakeTraceServer = ReturnType<typeof fakeTraceServer>;

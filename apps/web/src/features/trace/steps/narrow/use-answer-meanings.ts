@@ -21,7 +21,7 @@ export function useAnswerMeanings(open: readonly PartId[]): { overload?: string;
 }
 
 /** The one open point that alone parts what is in question as all the open ones do; `null` where it takes several. */
-export function decidingPoint(
+function decidingPoint(
   tree: SectionTree,
   inQuestion: readonly number[],
   open: readonly PartId[],

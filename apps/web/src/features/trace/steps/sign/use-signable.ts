@@ -32,7 +32,7 @@ function minutesOfRecord({ record }: TraceLog): number {
 }
 
 /** The parts of all repairs, each name once. */
-export function partsOf(repairs: TraceContext['repairs']): PartUsed[] {
+function partsOf(repairs: TraceContext['repairs']): PartUsed[] {
   const quantityByName = new Map<string, number>();
   for (const { name, quantity } of repairs.flatMap(({ parts }) => parts)) {
     quantityByName.set(name, (quantityByName.get(name) ?? 0) + quantity);
