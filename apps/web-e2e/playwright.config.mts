@@ -32,7 +32,6 @@ export default defineConfig({
     locale: 'en-US',
     timezoneId: 'America/Chicago',
     reducedMotion: 'reduce',
-    trace: 'retain-on-failure',
     launchOptions: {
       executablePath: process.env.CHROMIUM_PATH ?? '/usr/bin/chromium',
       args: quietChromium,
