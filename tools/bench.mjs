@@ -16,7 +16,7 @@ async function secondsToReady(data) {
   const from = performance.now();
   const child = spawn('npm', ['start'], {
     cwd: at('.'),
-    env: { ...process.env, PORT: String(port), LAMPWRIGHT_DATA: data, LOG_LEVEL: 'silent' },
+    env: { ...process.env, PORT: String(port), LAMPWRIGHT_DATA: data, LAMPWRIGHT_LOG: 'silent' },
     stdio: 'ignore',
     detached: true,
   });

@@ -13,20 +13,19 @@ const browser = chromium();
 
 rmSync(at('dist/reports'), { recursive: true, force: true });
 
-const nx = (...args) => run('npx', ['nx', ...args, '--output-style=static']);
+const nx = (targets) =>
+  run(
+    'npx',
+    ['nx', 'run-many', '-t', ...targets, '--parallel=2', '--nxBail=false', '--output-style=static'],
+    { CHROMIUM_PATH: browser },
+  );
 
 const steps = [
-  ['format', () => run('npx', ['prettier', '--check', '--log-level=warn', '.'])],
-  ['unused code', () => run('npx', ['knip'])],
+  ['build', () => nx(['build'])],
+  // Browser tests mostly wait for a hand's pace; the others work meanwhile on what they leave free.
   [
-    'lint, types, unit and API tests',
-    () => nx('run-many', '-t', 'lint', 'typecheck', 'test', '--parallel=2', '--nxBail=false'),
-  ],
-  ['build', () => nx('run-many', '-t', 'build')],
-  [
-    'browser tests',
-    () =>
-      run('npx', ['nx', 'run', 'web-e2e:e2e', '--output-style=stream'], { CHROMIUM_PATH: browser }),
+    'format, lint, types, unit, API and browser tests',
+    () => nx(['e2e', 'test', 'typecheck', 'lint', 'format', 'boundaries', 'unused']),
   ],
 ];
 

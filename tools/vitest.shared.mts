@@ -22,5 +22,6 @@ export const alias = packages.map(([name, path]) => ({
 /** Vitest settings of a pure library. */
 export const libraryTest: ViteUserConfig = {
   resolve: { alias },
+  cacheDir: `${repo}node_modules/.vite/libs`,
   test: { environment: 'node', globals: true, include: ['src/**/*.test.ts'] },
 };

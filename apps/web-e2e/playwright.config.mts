@@ -20,7 +20,8 @@ export default defineConfig({
   testDir: './src',
   outputDir: `${root}dist/e2e/results`,
   reporter: [['list'], ['json', { outputFile: `${root}dist/reports/web-e2e.json` }]],
-  workers: 2,
+  // A walk waits for a hand’s pace most of its time.
+  workers: 3,
   fullyParallel: true,
   forbidOnly: true,
   timeout: 90_000,

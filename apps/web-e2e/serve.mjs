@@ -7,5 +7,5 @@ const data = `${root}dist/e2e/data`;
 
 rmSync(data, { recursive: true, force: true });
 process.env.LAMPWRIGHT_DATA = data;
-process.env.LOG_LEVEL ??= 'warn';
+process.env.LAMPWRIGHT_LOG ??= 'warn';
 await import(`${root}dist/apps/api/apps/api/src/main.js`);

@@ -4,6 +4,7 @@ import { defineConfig } from 'vitest/config';
 import { alias } from '../../tools/vitest.shared.mts';
 
 const repo = fileURLToPath(new URL('../..', import.meta.url));
+const here = fileURLToPath(new URL('.', import.meta.url));
 
 /** Libraries that change together and that every screen needs. */
 const vendor = [
@@ -17,7 +18,7 @@ const vendor = [
 const onlyExports = /\/(apps\/web\/src\/(ui|lib|drawing)|libs\/[^/]+\/src)\/[^?]*\.tsx?$/;
 
 export default defineConfig({
-  root: fileURLToPath(new URL('.', import.meta.url)),
+  root: here,
   cacheDir: `${repo}node_modules/.vite/web`,
   plugins: [react()],
   resolve: { alias },
@@ -32,10 +33,24 @@ export default defineConfig({
     },
   },
   test: {
-    environment: 'jsdom',
     globals: true,
-    include: ['src/**/*.test.{ts,tsx}'],
     testTimeout: 60_000,
-    setupFiles: ['src/testing/setup.ts'],
+    setupFiles: [`${here}src/testing/setup.ts`],
+    // A document is built for the tests of components alone: it costs a second a file.
+    projects: [
+      {
+        extends: true,
+        test: { name: 'rules', environment: 'node', include: ['src/**/*.test.ts'] },
+      },
+      {
+        extends: true,
+        test: {
+          name: 'screens',
+          environment: 'jsdom',
+          include: ['src/**/*.test.tsx'],
+          setupFiles: [`${here}src/testing/setup-document.ts`],
+        },
+      },
+    ],
   },
 });

@@ -1,3 +1,5 @@
+import { expectAccessible, useTheme } from './audit';
+import { AuditedWalk } from './audited-walk';
 import { expect, test } from './fixtures';
 import { people, stateOf } from './people';
 import { TraceWalk } from './trace-walk';
@@ -6,11 +8,11 @@ import { TruthfulTrailer } from './truthful-trailer';
 test.use({ storageState: stateOf(people.technician) });
 
 const sizes = [
-  { name: 'tablet', viewport: { width: 1180, height: 820 } },
-  { name: 'phone', viewport: { width: 390, height: 844 } },
-];
+  { name: 'tablet', viewport: { width: 1180, height: 820 }, theme: 'light' },
+  { name: 'phone', viewport: { width: 390, height: 844 }, theme: 'dark' },
+] as const;
 
-for (const { name, viewport } of sizes) {
+for (const { name, viewport, theme } of sizes) {
   test.describe(`on a ${name}`, () => {
     test.use({ viewport });
 
@@ -48,8 +50,12 @@ for (const { name, viewport } of sizes) {
       await expect(page.getByText(/Plate lamp/).first()).toBeVisible();
     });
 
-    test('a splice on a utility trailer, with the lid closed on the way', async ({ page }) => {
-      const walk = new TraceWalk(page, new TruthfulTrailer('U-016', 'right', 'turn-splice-curb'));
+    test(`a splice, with the lid closed on the way; every step fit for gloves and accessible, ${theme}`, async ({
+      page,
+    }) => {
+      test.setTimeout(180_000);
+      await useTheme(page, theme);
+      const walk = new AuditedWalk(page, new TruthfulTrailer('U-016', 'right', 'turn-splice-curb'));
       await walk.toNarrow();
       await walk.doAsTold();
       const instruction = await walk.title.textContent();
@@ -60,7 +66,8 @@ for (const { name, viewport } of sizes) {
       await walk.narrow();
       await page.reload();
       await expect(walk.title).toHaveText(/^Look at/);
-      await walk.fromInspect();
+      await walk.fromInspect({ dark: ['Plate lamp'] });
+      await expectAccessible(page);
     });
   });
 }

@@ -5,7 +5,8 @@ import type { EventOf } from './eventOf';
 import type { Rule } from './rules/rule';
 import type { TraceContext } from './state';
 
-interface Now {
+/** What a guard or an action is handed. */
+export interface Now {
   context: TraceContext;
   event: TraceEvent;
 }

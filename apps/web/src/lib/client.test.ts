@@ -1,3 +1,4 @@
+// @vitest-environment jsdom
 import { fakeServer, nothing, ok, problem } from '../testing/fake-server';
 import { ApiError, NetworkError } from './api-error';
 import { api } from './client';
