@@ -23,5 +23,11 @@ export const alias = packages.map(([name, path]) => ({
 export const libraryTest: ViteUserConfig = {
   resolve: { alias },
   cacheDir: `${repo}node_modules/.vite/libs`,
-  test: { environment: 'node', globals: true, include: ['src/**/*.test.ts'] },
+  test: {
+    environment: 'node',
+    globals: true,
+    include: ['src/**/*.test.ts'],
+    // Pure code leaves nothing behind that another file could trip over.
+    isolate: false,
+  },
 };

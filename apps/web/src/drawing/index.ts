@@ -1,4 +1,4 @@
 export { HarnessDrawing } from './harness-drawing';
 export { HarnessList } from './harness-list';
 export { SuspicionBar } from './suspicion-bar';
-export type { DrawingMarks, HarnessDrawingProps, PlaceMark } from './marks';
+export type { DrawingMarks, DrawingTrailer, HarnessDrawingProps, PlaceMark } from './marks';

@@ -1,6 +1,6 @@
 import type { AccountDto, SignInRequest } from '@lampwright/contracts';
 import { useCallback, useEffect, useMemo, useState, type ReactNode } from 'react';
-import { applyTheme } from '../theme/theme-choice';
+import { followTheme } from '../theme/theme-choice';
 import { getAccount } from './api/account';
 import { signIn as postSignIn, signOut as postSignOut } from './api/auth';
 import { ApiError, NetworkError } from './api-error';
@@ -49,9 +49,7 @@ export function SessionProvider({ children }: { children: ReactNode }) {
   );
 
   const theme = session.state === 'in' ? session.account.preferences.theme : null;
-  useEffect(() => {
-    if (theme) applyTheme(theme);
-  }, [theme]);
+  useEffect(() => (theme ? followTheme(theme) : undefined), [theme]);
 
   const replace = useCallback((account: AccountDto) => {
     void keptAccount.write(account);

@@ -1,5 +1,5 @@
 import '@testing-library/jest-dom/vitest';
-import { configure } from '@testing-library/react';
+import { cleanup, configure } from '@testing-library/react';
 
 // Screens are fetched when they are first opened, which a busy machine takes its time over.
 configure({ asyncUtilTimeout: 15_000 });
@@ -31,3 +31,6 @@ HTMLDialogElement.prototype.showModal ??= function showModal(this: HTMLDialogEle
 HTMLDialogElement.prototype.close ??= function close(this: HTMLDialogElement) {
   this.open = false;
 };
+
+// The files share one document, so each is told to leave it empty.
+afterEach(cleanup);

@@ -2,10 +2,10 @@ import { chakra } from '@chakra-ui/react';
 import type { CircuitId, Harness, PartId } from '@lampwright/harness';
 import { useState } from 'react';
 import { useTranslation } from 'react-i18next';
-import { HarnessDrawing } from '../drawing/harness-drawing';
-import type { DrawingMarks, DrawingTrailer } from '../drawing/marks';
+import { HarnessDrawing, HarnessList, type DrawingMarks, type DrawingTrailer } from '../drawing';
 import { useAccount } from '../lib/session-context';
 import { Select } from './select';
+import { VisuallyHidden } from './visually-hidden';
 
 /** No question is asked of the plan here. */
 const UNMARKED: DrawingMarks = { cut: [], open: [], places: new Map() };
@@ -57,6 +57,9 @@ export function PlanPicture({ harness, trailer }: { harness: Harness; trailer?: 
           onPick={setPicked}
           {...(trailer ? { trailer } : {})}
         />
+        <VisuallyHidden as="div">
+          <HarnessList harness={harness} circuit={circuit} marks={UNMARKED} />
+        </VisuallyHidden>
       </Sheet>
       <Picked role="status">
         {part ? (
