@@ -15,6 +15,18 @@ export const controlRecipe = defineRecipe({
     borderColor: 'edge',
     borderRadius: 'md',
     '&[aria-invalid]': { borderColor: 'ember.mark', borderWidth: '2px' },
+    '&::file-selector-button': {
+      font: 'inherit',
+      color: 'fg',
+      bg: 'bg.sunken',
+      border: '1.5px solid',
+      borderColor: 'edge',
+      borderRadius: 'sm',
+      px: '3.5',
+      py: '1.5',
+      me: '3.5',
+      cursor: 'pointer',
+    },
     _disabled: { opacity: '0.6', cursor: 'not-allowed' },
   },
   variants: {
