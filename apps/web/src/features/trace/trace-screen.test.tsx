@@ -1,5 +1,5 @@
 import { screen, waitFor, within } from '@testing-library/react';
-import { newRecord, Teller } from '@lampwright/trace/testing';
+import { fuse, newRecord, Teller } from '@lampwright/trace/testing';
 import { renderTrace } from './testing/render-trace';
 
 const at = (name: string | RegExp) => screen.findByRole('heading', { level: 1, name });
@@ -77,6 +77,26 @@ describe('confirm', () => {
     await tap(/^Lamp lights bright/);
     await at('What power showed');
     expect(await newest()).toMatchObject({ type: 'circuit.confirmed', amps: 2.1 });
+  });
+
+  it('says what amps mean as they are typed', async () => {
+    const { tap, user } = await renderTrace(record(new Teller().starts(['tail'], fuse)));
+    await tap('Add amps');
+    const field = screen.getByLabelText(/Amps/);
+    await user.type(field, '2,1');
+    expect(screen.getByText(/^More than healthy lamps draw/)).toBeVisible();
+    expect(screen.getByText(/a short that does not trip may be/)).toBeVisible();
+    await user.clear(field);
+    await user.type(field, '0,3');
+    expect(screen.getByText(/^Less than all its lamps draw/)).toBeVisible();
+    expect(screen.getByText(/^May be dark: /)).toBeVisible();
+  });
+
+  it('says nothing of amps that a lamp in series sets', async () => {
+    const { tap, user } = await renderTrace(record(new Teller().starts()));
+    await tap('Add amps');
+    await user.type(screen.getByLabelText(/Amps/), '2,1');
+    expect(screen.queryByText(/healthy lamps draw/)).toBeNull();
   });
 
   it('says so when nothing is wrong, and offers the wiggle check instead of a fault', async () => {

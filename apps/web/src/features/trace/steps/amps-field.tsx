@@ -1,15 +1,11 @@
-import {
-  energisedParts,
-  expectedAmps,
-  sectionTree,
-  type CircuitId,
-  type PartId,
-} from '@lampwright/harness';
+import type { CircuitId, PartId } from '@lampwright/harness';
+import { expectedLoad } from '@lampwright/isolation';
 import { useMemo, useState } from 'react';
 import { TextInput } from '../../../ui';
 import { FieldButton } from '../controls/field-button';
 import { useTraceContext } from '../store/trace-session';
 import { useTraceWords } from '../words/use-trace-words';
+import { AmpsMeaning } from './amps-meaning';
 
 interface AmpsFieldProps {
   circuit: CircuitId;
@@ -23,10 +19,11 @@ interface AmpsFieldProps {
 export function AmpsField({ circuit, open, value, onChange }: AmpsFieldProps) {
   const t = useTraceWords();
   const harness = useTraceContext((context) => context.record.plan.harness);
-  const expected = useMemo(() => {
-    const energised = energisedParts(sectionTree(harness, circuit), open);
-    return expectedAmps(harness, circuit, energised);
-  }, [harness, circuit, open]);
+  const expected = useMemo(
+    () => expectedLoad(harness, circuit, open).amps,
+    [harness, circuit, open],
+  );
+  const { amps } = readAmps(value);
   const [asked, setAsked] = useState(false);
   if (!asked && value === '') {
     return (
@@ -36,14 +33,17 @@ export function AmpsField({ circuit, open, value, onChange }: AmpsFieldProps) {
     );
   }
   return (
-    <TextInput
-      size="field"
-      inputMode="decimal"
-      label={t('confirm.amps')}
-      hint={t('confirm.ampsExpected', { amps: expected.toFixed(1) })}
-      value={value}
-      onChange={(event) => onChange(event.target.value)}
-    />
+    <>
+      <TextInput
+        size="field"
+        inputMode="decimal"
+        label={t('confirm.amps')}
+        hint={t('confirm.ampsExpected', { amps: expected.toFixed(1) })}
+        value={value}
+        onChange={(event) => onChange(event.target.value)}
+      />
+      {amps !== undefined && <AmpsMeaning circuit={circuit} open={open} amps={amps} />}
+    </>
   );
 }
 
