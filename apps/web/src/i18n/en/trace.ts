@@ -574,6 +574,8 @@ export default {
     what: {
       intake: '{{complaint}}. Circuits: {{circuits}}. Feed: {{feed}}.',
       confirmed: '{{circuit}}: {{outcome}}',
+      chosen: '{{circuit}} first',
+      allLit: '{{circuit}}: all lamps lit',
       amps: '{{amps}} A',
       reading: '{{points}}: {{outcome}}',
       barred: '{{point}}: {{reason}}',

@@ -22,7 +22,7 @@ export function MinutesSoFar() {
   const now = useMinute();
   if (!store && !signedAt) return null;
   const minutes = minutesBetween(openedAt, signedAt ?? now);
-  return <Chip>{t('page.minutesSoFar', { count: minutes })}</Chip>;
+  return <Chip>{t(signedAt ? 'time.minutes' : 'page.minutesSoFar', { count: minutes })}</Chip>;
 }
 
 /** The time, renewed twice a minute. */

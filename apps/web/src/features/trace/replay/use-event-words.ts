@@ -5,6 +5,9 @@ import { outcomeWords } from '../words/outcome-words';
 import { useNames } from '../words/use-names';
 import { useTraceWords } from '../words/use-trace-words';
 
+/** People end what they type with a stop or without; the sentence around it has its own. */
+const bare = (typed: string) => typed.trim().replace(/[.\s]+$/, '');
+
 /** What an entry says, in a sentence; empty where its name says it all. */
 export function useEventWords(): (event: TraceEvent) => string {
   const t = useTraceWords();
@@ -23,7 +26,7 @@ export function useEventWords(): (event: TraceEvent) => string {
     switch (event.type) {
       case 'intake.stated':
         return t('replay.what.intake', {
-          complaint: event.complaint,
+          complaint: bare(event.complaint),
           circuits: names.list(event.circuits.map(names.circuit)),
           feed: t(`feed.${event.feed.kind}.name`),
         });
@@ -45,8 +48,9 @@ export function useEventWords(): (event: TraceEvent) => string {
           : reading;
       }
       case 'circuit.chosen':
+        return t('replay.what.chosen', { circuit: names.circuit(event.circuit) });
       case 'circuit.allLit':
-        return names.circuit(event.circuit);
+        return t('replay.what.allLit', { circuit: names.circuit(event.circuit) });
       case 'point.barred':
         return t('replay.what.barred', {
           point: names.part(event.point),
@@ -71,8 +75,8 @@ export function useEventWords(): (event: TraceEvent) => string {
       case 'repair.made':
         return t('replay.what.repair', {
           place: names.place(event.place),
-          cause: event.cause,
-          correction: event.correction,
+          cause: bare(event.cause),
+          correction: bare(event.correction),
         });
       case 'lamp.checked':
         return t('replay.what.lamp', {
@@ -82,8 +86,8 @@ export function useEventWords(): (event: TraceEvent) => string {
       case 'trace.signed':
         return t('replay.what.signed', {
           name: event.name,
-          cause: event.cause,
-          correction: event.correction,
+          cause: bare(event.cause),
+          correction: bare(event.correction),
         });
       default:
         return '';
