@@ -79,9 +79,11 @@ function sizeRows(): BenchRow[] {
   return [
     row('first decision at 1,000 points, branching', grownTree(1000, 10, 7), '< 300'),
     row('first decision at 1,000 points, all on one hub', grownTree(1000, 1000, 7), '< 300'),
+    row('first decision at 2,000 points, branching', grownTree(2000, 10, 7)),
+    row('first decision at 5,000 points, branching', grownTree(5000, 10, 7)),
     row('first decision at 10,000 points, branching', grownTree(10_000, 10, 7), '< 2000'),
     row('first decision at 10,000 points, one chain', grownTree(10_000, 1, 7), '< 2000'),
-    row('first decision at 10,000 points, all on one hub', grownTree(10_000, 10_000, 7)),
+    row('first decision at 10,000 points, all on one hub', grownTree(10_000, 10_000, 7), '< 2000'),
   ];
 }
 
@@ -126,6 +128,7 @@ function excessRows(): BenchRow[] {
       const tree = sectionTree(harness, circuit);
       return names.map((name) => excessOf(tree, settings[name], expected[name], planners));
     });
+    const mostAllowed = over.startsWith('optimum') ? '< 0.02' : '<= 0';
     const row = (what: string, values: number[], target?: string): BenchRow => ({
       name: `expected seconds over the ${over}: ${what}`,
       value: mean(values),
@@ -140,7 +143,7 @@ function excessRows(): BenchRow[] {
       row(
         'final answer',
         all.map(({ thorough }) => thorough),
-        '<= 0',
+        mostAllowed,
       ),
       row(
         'one point at a time, most bits a second',
@@ -160,5 +163,11 @@ function excessRows(): BenchRow[] {
 
 /** Measures the planner: how long it thinks, and how much longer its plays take than the best known ones. */
 export function plannerRows(): BenchRow[] {
-  return [...decisionRows(), ...sizeRows(), ...excessRows()];
+  const rows = [...decisionRows(), ...sizeRows(), ...excessRows()];
+  // Garbage not yet collected counts too, and so does the bench itself.
+  const megabytes = process.memoryUsage().heapUsed / 1e6;
+  return [
+    ...rows,
+    { name: 'heap after all of this', value: megabytes, unit: 'MB', target: '< 200' },
+  ];
 }

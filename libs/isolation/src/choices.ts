@@ -46,8 +46,8 @@ export function choicesOf(bench: Workbench, situation: Situation, mostNew: numbe
     const start = asItIs(bench, situation, base);
     if (start) found.push(start);
     const firsts: Choice[] = [];
-    visitExtensions(bench, situation, base, (v, rate) => {
-      firsts.push({ open: withPoint(base, v), rate });
+    visitExtensions(bench, situation, base, (v, share, seconds) => {
+      firsts.push({ open: withPoint(base, v), rate: rateOf(share, seconds) });
     });
     firsts.sort((a, b) => b.rate - a.rate);
     found.push(...firsts);
@@ -68,7 +68,8 @@ function asItIs(
   situation: Situation,
   open: readonly number[],
 ): Choice | undefined {
-  const step = bench.step(situation, open);
+  // With nothing open everything has power, which tells nothing.
+  const step = open.length > 0 ? bench.step(situation, open) : null;
   if (!step) return undefined;
   const share = step.onOverload.weight / situation.weight;
   return { open, rate: rateOf(share, step.seconds + share * bench.cells.overloadSeconds) };
@@ -81,7 +82,11 @@ function bestExtension(
 ): Choice | undefined {
   let best = -1;
   let highest = -1;
-  visitExtensions(bench, situation, base, (v, rate) => {
+  visitExtensions(bench, situation, base, (v, share, seconds) => {
+    // A reading has at most 2 sqrt(p (1 - p)) bits: most points are passed over without a logarithm.
+    const most = highest * Math.max(seconds, SHORTEST);
+    if (most > 0 && 4 * share * (1 - share) < most * most) return;
+    const rate = rateOf(share, seconds);
     if (rate <= highest) return;
     highest = rate;
     best = v;
@@ -89,12 +94,12 @@ function bestExtension(
   return best < 0 ? undefined : { open: withPoint(base, best), rate: highest };
 }
 
-/** Visits every point that can be opened on top of `base`, with the rate of having both open. O(cells). */
+/** Visits every point that can be opened on top of `base`: how likely an overload then is, and in how many seconds. O(cells). */
 function visitExtensions(
   bench: Workbench,
   situation: Situation,
   base: readonly number[],
-  visit: (v: number, rate: number) => void,
+  visit: (v: number, share: number, seconds: number) => void,
 ): void {
   const { hands, walk, weight, overloadSeconds, powerSeconds } = bench.cells;
   const energised = bench.surveyEnergised(situation, base);
@@ -115,12 +120,14 @@ function visitExtensions(
   for (const v of situation.open) {
     if (!base.includes(v)) farthest = Math.max(farthest, walk[v] ?? 0);
   }
+  const noneOpen = situation.open.length === 0;
   for (const v of energised) {
     const beyond = bench.countBeyond[v] ?? 0;
-    if (v === 0 || beyond === 0 || beyond === count || situation.open.includes(v)) continue;
+    if (v === 0 || beyond === 0 || beyond === count) continue;
+    if (!noneOpen && situation.open.includes(v)) continue;
     const share = (lit - (bench.beyond[v] ?? 0)) / situation.weight;
     const effort = seconds + (hands[v] ?? 0) + Math.max(farthest, walk[v] ?? 0);
-    visit(v, rateOf(share, effort + share * overloadSeconds));
+    visit(v, share, effort + share * overloadSeconds);
   }
 }
 

@@ -2,6 +2,7 @@ import { choicesOf } from './choices';
 import { exactFinding } from './exact/exactFinding';
 import type { Finding } from './finding';
 import { greedy } from './greedy';
+import { halfInOrder } from './halfInOrder';
 import { easiestFirst, halfByCount } from './habits';
 import { playOut, type Policy } from './playOut';
 import { Search, type Allows, type Breadth } from './search';
@@ -17,11 +18,22 @@ const MOST_CELLS_TO_TRY = 2000;
 /** Choices tried by greedy play where there are too many cells to search. */
 const TRIED = 6;
 
-/** Cells that the decisions of one play may look at, but for the greedy play, which is always played out. */
-const MOST_LOOKS = 5_000_000;
+/** Cells that the decisions of all plays together may look at, but for those of the first. */
+const MOST_LOOKS = 1_000_000;
 
-/** The play that is always known. */
 const greedyPlay = greedy(1);
+
+/** Cells that the first play may look at before it goes on as cheaply as can be, so that it always comes to its end. */
+const MOST_GREEDY_LOOKS = 6_000_000;
+
+/** The play that is always known: greedy as long as that can be thought through. */
+function firstPlay(): Policy {
+  let left = MOST_GREEDY_LOOKS;
+  return (bench, situation) => {
+    left -= situation.cells.length;
+    return left > 0 ? greedyPlay(bench, situation) : halfInOrder(bench, situation);
+  };
+}
 
 /** What stands behind a choice while it is ranked. */
 const policies = [greedy(3)];
@@ -53,20 +65,17 @@ export function lookAhead(
   steps: Steps,
   allows: Allows,
 ): Finding | null {
-  let found = playedBy(bench, situation, greedyPlay, allows);
+  let found = playedBy(bench, situation, firstPlay(), allows);
   const offer = (next: Finding | null) => {
     if (next && (!found || next.length.weighted < found.length.weighted)) found = next;
   };
+  const looks = new Steps(MOST_LOOKS);
   for (const policy of baselines) {
-    offer(
-      within(new Steps(MOST_LOOKS), MOST_LOOKS, (looks) =>
-        playedBy(bench, situation, policy, allows, looks),
-      ),
-    );
+    offer(within(looks, looks.left, (left) => playedBy(bench, situation, policy, allows, left)));
   }
   const size = situation.cells.length;
   if (size > MOST_CELLS_TO_SEARCH) {
-    const tried = size <= MOST_CELLS_TO_TRY ? trials(bench, situation, allows) : [];
+    const tried = size <= MOST_CELLS_TO_TRY ? trials(bench, situation, allows, looks) : [];
     tried.forEach(offer);
     return found;
   }
@@ -78,8 +87,8 @@ export function lookAhead(
   return found;
 }
 
-/** The choices of the highest rate, with greedy play behind each. O(cells x power-ups) for each. */
-function trials(bench: Workbench, situation: Situation, allows: Allows): Finding[] {
+/** The choices of the highest rate, with greedy play behind each, as far as the looks go. O(cells x power-ups) for each. */
+function trials(bench: Workbench, situation: Situation, allows: Allows, looks: Steps): Finding[] {
   return choicesOf(bench, situation, 1)
     .sort((a, b) => b.rate - a.rate)
     .slice(0, TRIED)
@@ -87,7 +96,8 @@ function trials(bench: Workbench, situation: Situation, allows: Allows): Finding
       const step = bench.step(situation, open);
       if (!step || !allows(step)) return [];
       const first: Policy = (_, at) => (at === situation ? step : greedyPlay(bench, at));
-      return [{ step, length: playOut(bench, situation, first), optimal: false }];
+      const length = within(looks, looks.left, (left) => playOut(bench, situation, first, left));
+      return length ? [{ step, length, optimal: false }] : [];
     });
 }
 
@@ -99,7 +109,7 @@ export function candidates(
   allows: Allows,
 ): Finding[] {
   if (situation.cells.length > MOST_CELLS_TO_SEARCH) {
-    return trials(bench, situation, allows)
+    return trials(bench, situation, allows, new Steps(MOST_LOOKS))
       .sort((a, b) => a.length.weighted - b.length.weighted)
       .slice(0, most);
   }

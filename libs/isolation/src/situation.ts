@@ -65,8 +65,8 @@ export class Workbench {
   }
 
   /** The same for those of the cells that stay energised with these points open; returns them. O(cells). */
-  surveyEnergised(situation: Situation, open: readonly number[]): number[] {
-    const energised = this.part(situation, open).energised;
+  surveyEnergised(situation: Situation, open: readonly number[]): readonly number[] {
+    const energised = open.length > 0 ? this.part(situation, open).energised : situation.cells;
     this.sum(energised);
     return energised;
   }
@@ -160,17 +160,18 @@ export class Workbench {
 
   private sum(cells: readonly number[]): void {
     const { beyond, countBeyond, cells: all } = this;
+    const { mark } = this;
+    const inside = ++this.stamp;
     for (const v of cells) {
       const share = all.weight[v] ?? 0;
       beyond[v] = share;
       countBeyond[v] = share > 0 ? 1 : 0;
+      mark[v] = inside;
     }
-    const inside = ++this.stamp;
-    for (const v of cells) this.mark[v] = inside;
     for (let at = cells.length - 1; at >= 0; at -= 1) {
       const v = cells[at] ?? 0;
       const up = all.parent[v] ?? -1;
-      if (up < 0 || this.mark[up] !== inside) continue;
+      if (up < 0 || mark[up] !== inside) continue;
       beyond[up] = (beyond[up] ?? 0) + (beyond[v] ?? 0);
       countBeyond[up] = (countBeyond[up] ?? 0) + (countBeyond[v] ?? 0);
     }
