@@ -1,5 +1,6 @@
 import type { SectionTree } from '@lampwright/harness';
-import { kindsOf, likelihood, type Kind } from './kinds';
+import { placeOf, slopesOf, sumsOf, termsOf, totalOf, type Term } from './beliefTerms';
+import { kindsOf, type Kind } from './kinds';
 import type { Belief, BeliefOptions, Reading } from './types';
 
 /**
@@ -10,6 +11,18 @@ export const ANOTHER_SHORT_FACTOR = 0.2;
 
 /** Above this many kinds of section, three shorts are looked at as two: the sum over triples would take too long. */
 const MOST_KINDS_FOR_THREE = 150;
+
+/** Every set of shorts with its weight, sorted by the kinds of its members. */
+export interface WeighedSets {
+  kinds: Kind[];
+  /** By section index. */
+  kindOf: number[];
+  terms: Term[];
+  /** See `sumsOf`. */
+  sums: Float64Array;
+  /** The weight of all sets together; 0 when none explains the readings. */
+  total: number;
+}
 
 /**
  * Bayes' rule, exact, over every set of 1 to `maxFaults` sections. A set weighs the product of its sections'
@@ -25,24 +38,49 @@ export function believe(
   readings: readonly Reading[],
   options: BeliefOptions = {},
 ): Belief {
-  const { detection = 1, maxFaults = 1 } = options;
+  const sets = weighSets(tree, readings, options);
+  const { total } = sets;
+  if (!(total > 0)) {
+    const probabilities = tree.sections.map(() => 0);
+    return { probabilities, inQuestion: [], contradicted: true };
+  }
+  const probabilities = shareOfEach(tree, sets);
+  return { probabilities, inQuestion: mostLikelyFirst(probabilities), contradicted: false };
+}
+
+/** Weighs every set of shorts by the readings, as `believe` does. */
+export function weighSets(
+  tree: SectionTree,
+  readings: readonly Reading[],
+  { detection = 1, maxFaults = 1 }: BeliefOptions,
+): WeighedSets {
   const { kinds, kindOf } = kindsOf(tree, readings);
   const most = maxFaults > 2 && kinds.length > MOST_KINDS_FOR_THREE ? 2 : maxFaults;
-  const weightOf = kinds.map((kind) =>
-    setsWith(kind, kinds, most, (...set) => likelihood(set, readings, detection)),
-  );
-
-  let total = 0;
-  const weights = tree.sections.map(({ index, probability }) => {
-    const [one, two, three] = weightOf[kindOf[index] ?? 0]?.(probability) ?? [0, 0, 0];
-    total += one + two / 2 + three / 3;
-    return one + two + three;
+  const terms = termsOf(kinds, readings, {
+    detection,
+    maxFaults: most,
+    another: ANOTHER_SHORT_FACTOR,
   });
-  if (!(total > 0)) {
-    return { probabilities: weights.map(() => 0), inQuestion: [], contradicted: true };
-  }
-  const probabilities = weights.map((weight) => weight / total);
-  return { probabilities, inQuestion: mostLikelyFirst(probabilities), contradicted: false };
+  const sums = sumsOf(kinds);
+  return { kinds, kindOf, terms, sums, total: totalOf(terms, sums) };
+}
+
+/** By section: the weight of the sets that it is in, as a share of all. The others of its kind enter without it. */
+function shareOfEach(tree: SectionTree, { kinds, kindOf, terms, sums, total }: WeighedSets) {
+  const slopes = slopesOf(terms, sums);
+  return tree.sections.map(({ index, probability: p }) => {
+    const at = kindOf[index] ?? 0;
+    const kind = kinds[at];
+    if (!kind || p === 0) return 0;
+    // Counting members keeps rounding from inventing sets that a small kind does not have.
+    const kin = kind.members > 1 ? kind.sum - p : 0;
+    const kinPairs = kind.members > 2 ? Math.max(0, kind.pairs - p * kin) : 0;
+    const weight =
+      (slopes[placeOf(at, 1)] ?? 0) +
+      kin * (slopes[placeOf(at, 2)] ?? 0) +
+      kinPairs * (slopes[placeOf(at, 3)] ?? 0);
+    return Math.min(1, (p * weight) / total);
+  });
 }
 
 /** Indices of the sections with a probability above 0, most likely first, equal ones in section order. */
@@ -50,43 +88,4 @@ function mostLikelyFirst(probabilities: readonly number[]): number[] {
   return [...probabilities.keys()]
     .filter((index) => (probabilities[index] ?? 0) > 0)
     .sort((a, b) => (probabilities[b] ?? 0) - (probabilities[a] ?? 0) || a - b);
-}
-
-type WeightBySize = [one: number, two: number, three: number];
-
-/**
- * For a section of the given kind, as a function of its probability p: the weight of all sets of one, two and three
- * shorts that it is in. The other members of its own kind enter without it, through elementary symmetric sums.
- */
-function setsWith(
-  kind: Kind,
-  kinds: readonly Kind[],
-  most: number,
-  likely: (...set: Kind[]) => number,
-): (p: number) => WeightBySize {
-  const alone = likely(kind);
-  const others = most > 1 ? kinds.filter((other) => other !== kind) : [];
-  const withOne = others.map((other) => likely(kind, other));
-  let oneOther = 0;
-  let twoOthers = 0;
-  others.forEach((other, at) => {
-    oneOther += other.sum * (withOne[at] ?? 0);
-    if (most < 3) return;
-    twoOthers += other.pairs * (withOne[at] ?? 0);
-    for (const third of others.slice(at + 1)) {
-      twoOthers += other.sum * third.sum * likely(kind, other, third);
-    }
-  });
-  const second = most > 1 ? ANOTHER_SHORT_FACTOR : 0;
-  const third = most > 2 ? ANOTHER_SHORT_FACTOR ** 2 : 0;
-  return (p) => {
-    // Counting members keeps rounding from inventing sets that a small kind does not have.
-    const kin = kind.members > 1 ? kind.sum - p : 0;
-    const kinPairs = kind.members > 2 ? kind.pairs - p * kin : 0;
-    return [
-      p * alone,
-      second * p * (oneOther + kin * alone),
-      third * p * (twoOthers + kin * oneOther + kinPairs * alone),
-    ];
-  };
 }

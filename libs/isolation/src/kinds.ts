@@ -11,6 +11,8 @@ export interface Kind {
   sum: number;
   /** Sum of the products of each two of them. */
   pairs: number;
+  /** Sum of the products of each three of them. */
+  triples: number;
 }
 
 /** Sorts the sections into kinds. O(sections x readings). */
@@ -25,27 +27,13 @@ export function kindsOf(
     const energised = lit.map((sections) => sections[index] === true);
     const signature = energised.map(Number).join('');
     const at = bySignature.get(signature) ?? kinds.length;
-    const kind = (kinds[at] ??= { energised, members: 0, sum: 0, pairs: 0 });
+    const kind = (kinds[at] ??= { energised, members: 0, sum: 0, pairs: 0, triples: 0 });
     bySignature.set(signature, at);
     if (probability > 0) kind.members += 1;
+    kind.triples += kind.pairs * probability;
     kind.pairs += kind.sum * probability;
     kind.sum += probability;
     return at;
   });
   return { kinds, kindOf };
-}
-
-/** Probability of the readings when one section of each of these kinds is short and nothing else is. O(readings). */
-export function likelihood(
-  set: readonly Kind[],
-  readings: readonly Reading[],
-  detection: number,
-): number {
-  let product = 1;
-  for (const [index, { outcome }] of readings.entries()) {
-    const shown = set.some((kind) => kind.energised[index]) ? detection : 0;
-    product *= outcome === 'overload' ? shown : 1 - shown;
-    if (product === 0) break;
-  }
-  return product;
 }
