@@ -10,8 +10,10 @@ export interface Forecast {
   expectedPowerUps: number;
   /** No order of work can beat this expectation. */
   lowerBoundSeconds: number;
-  /** Whether the planner's play is proven best. */
+  /** Whether every decision of the play is proven best. */
   proven: boolean;
+  /** Share of the places, by probability, that the play ends with when the short is there. */
+  foundRate: number;
 }
 
 /** A question at the start of a trace: nothing open, every section as likely as the plan says. */
@@ -32,22 +34,22 @@ export function forecast(tree: SectionTree, timing: Timing, planner: Planner): F
     expectedPowerUps: 0,
     lowerBoundSeconds: 0,
     proven: true,
+    foundRate: 1,
   };
   const ahead = [{ question: first, share: 1, seconds: 0 }];
   for (let next = ahead.pop(); next; next = ahead.pop()) {
     const { question, share, seconds } = next;
     const plan = planner.plan(question);
     if (plan.kind === 'known') {
+      outlook.foundRate -= share * (1 - (question.probabilities[plan.section] ?? 0));
       outlook.expectedSeconds += share * plan.closingSeconds;
       outlook.worstSeconds = Math.max(outlook.worstSeconds, seconds + plan.closingSeconds);
       if (question === first) outlook.lowerBoundSeconds = plan.closingSeconds;
       continue;
     }
     const { open, overloadProbability, proof, lowerBoundSeconds } = plan.advice;
-    if (question === first) {
-      outlook.lowerBoundSeconds = lowerBoundSeconds;
-      outlook.proven = proof === 'optimal';
-    }
+    if (question === first) outlook.lowerBoundSeconds = lowerBoundSeconds;
+    outlook.proven &&= proof === 'optimal';
     outlook.expectedPowerUps += share;
     const cost = powerUpSeconds(tree, question.open, open, timing);
     for (const outcome of ['overload', 'holds'] as const) {

@@ -91,3 +91,78 @@ export type Plan =
 export interface Planner {
   plan(question: Question): Plan;
 }
+
+/** A short that was found and mended. */
+export interface Mended {
+  section: number;
+  /** How many of the hunt's readings were taken before it was mended. */
+  after: number;
+  /** How likely the section is to hold another short, as a share of what it was. Default 0. */
+  again?: number;
+}
+
+/** What a planner is asked where readings may miss a short or several shorts may be there. */
+export interface Hunt {
+  /** With the probabilities from before the first reading. */
+  tree: SectionTree;
+  /** All readings of the circuit, oldest first; also those from before a repair. */
+  readings: readonly Reading[];
+  options: BeliefOptions;
+  /** The separable parts that are open now, also those of other circuits. */
+  open: readonly PartId[];
+  timing: Timing;
+  /** As in `Question`. */
+  elsewhere?: readonly SeparablePoint[];
+  mended?: readonly Mended[];
+  /** Sections that were looked over and hold no short. */
+  lookedOver?: readonly number[];
+  /** Points that can no longer be moved; readings with them open still count. */
+  barred?: readonly PartId[];
+  /** From this probability on a section counts as found, and the circuit as clear. See `stopsAt`. */
+  confidence?: number;
+}
+
+/** One proposed power-up of a hunt, in facts and figures. */
+export interface HuntAdvice {
+  /** `prove`: everything closed after a repair, to see whether another short is left. */
+  purpose: 'narrow' | 'prove';
+  open: PartId[];
+  toOpen: PartId[];
+  toClose: PartId[];
+  /** Sections that would be energised. */
+  energised: number[];
+  overloadProbability: number;
+  /** Seconds of this power-up, by its outcome. */
+  seconds: Record<Outcome, number>;
+  /** What the reading is expected to tell. */
+  bits: number;
+  /** `optimal` only with one short that always shows. */
+  proof: Proof;
+  /** True where the same sections held before: to be read again, this time with the harness moved by hand. */
+  repeats: boolean;
+  /** What would be named now, most likely first: one section, or several that barred points join. */
+  likeliest: { sections: number[]; probability: number };
+  /** The probability at which it counts as found. */
+  stopsAt: number;
+}
+
+/** What comes next in a hunt. */
+export type HuntPlan =
+  | { kind: 'powerUp'; advice: HuntAdvice }
+  /** A section holds a short, with this probability; one of several, most likely first, where barred points join them. */
+  | {
+      kind: 'found';
+      sections: number[];
+      confidence: number;
+      stopsAt: number;
+      closingSeconds: number;
+    }
+  /** No short is left, with this probability; only ever after a repair. */
+  | { kind: 'clear'; confidence: number; stopsAt: number; closingSeconds: number }
+  /** No set of shorts within the options explains the readings. */
+  | { kind: 'contradicted' };
+
+/** Chooses the next power-up of a hunt. Pure: the same hunt gives the same plan. */
+export interface HuntPlanner {
+  plan(hunt: Hunt): HuntPlan;
+}
