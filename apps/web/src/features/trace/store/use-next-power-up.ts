@@ -17,14 +17,15 @@ export interface NextPowerUp {
   own: Advice | null;
 }
 
-/** What is to be done next: the person's own choice while one stands, else the advice. `null` while there is no question. */
+/** What is to be done next: the person's own choice while one stands, else the advice. `null` while there is no question, or
+ * no answer yet. */
 export function useNextPowerUp(): NextPowerUp | null {
   const question = useTraceContext((context) => situation(context)?.question ?? null);
   const chosen = useTraceContext((context) => context.chosen);
   const open = useTraceContext((context) => context.open);
-  const { advised, own } = useAdvice(question, chosen);
+  const { advised, own, pending } = useAdvice(question, chosen);
   return useMemo(() => {
-    if (!advised) return null;
+    if (!advised || pending) return null;
     if (!own) {
       const { toOpen, toClose } = advised;
       return { advised, open: advised.open, toOpen, toClose, own: null };
@@ -36,5 +37,5 @@ export function useNextPowerUp(): NextPowerUp | null {
       toClose: open.filter((point) => !own.open.includes(point)),
       own,
     };
-  }, [advised, own, open]);
+  }, [advised, own, pending, open]);
 }

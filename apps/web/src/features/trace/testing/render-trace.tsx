@@ -3,8 +3,10 @@ import type { TraceRecord } from '@lampwright/trace';
 import { render, screen, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { MemoryRouter } from 'react-router-dom';
+import { PlannerContext } from '../../../lib/planner';
 import { SessionContext, type SessionControl } from '../../../lib/session-context';
 import { account } from '../../../testing/fixtures';
+import { plannerInPlace } from '../../../testing/planner-in-place';
 import { system } from '../../../theme/system';
 import { TapGuardProvider } from '../controls/tap-guard';
 import { TraceScreen } from '../trace-screen';
@@ -28,9 +30,11 @@ export async function renderTrace(record: TraceRecord, { pause = 0 } = {}) {
     <ChakraProvider value={system}>
       <SessionContext value={session}>
         <MemoryRouter>
-          <TapGuardProvider pause={pause}>
-            <TraceScreen store={store} />
-          </TapGuardProvider>
+          <PlannerContext value={plannerInPlace}>
+            <TapGuardProvider pause={pause}>
+              <TraceScreen store={store} />
+            </TapGuardProvider>
+          </PlannerContext>
         </MemoryRouter>
       </SessionContext>
     </ChakraProvider>,

@@ -1,3 +1,4 @@
+import { chakra } from '@chakra-ui/react';
 import type { PartId } from '@lampwright/harness';
 import { useCallback, useState } from 'react';
 import { Panel, PanelBody, Text } from '../../controls/panel';
@@ -14,7 +15,6 @@ import { PowerUpScreen } from './power-up-screen';
 
 /** The next power-up, and what can be said instead of doing it. */
 export function DecidingScreens() {
-  const t = useTraceWords();
   const next = useNextPowerUp();
   const [mode, setMode] = useState<NarrowMode>('powerUp');
   const [touched, setTouched] = useState<PartId | null>(null);
@@ -26,20 +26,8 @@ export function DecidingScreens() {
     setTouched(null);
     setMode('powerUp');
   };
-  if (!next) {
-    return (
-      <Panel>
-        <PanelBody>
-          <Text>{t('narrow.working')}</Text>
-        </PanelBody>
-      </Panel>
-    );
-  }
+  // What is being said stays on the screen while the planner thinks about what was said so far.
   switch (mode) {
-    case 'bar':
-      return <BarScreen points={next.toOpen} back={back} />;
-    case 'pick':
-      return <PickScreen next={next} touched={touched} back={back} />;
     case 'else':
       return <ElseScreen go={setMode} back={back} />;
     case 'plan':
@@ -48,7 +36,30 @@ export function DecidingScreens() {
       return <DamageScreen back={back} />;
     case 'feed':
       return <FeedChangeScreen back={back} />;
-    default:
+  }
+  if (!next) return <Working />;
+  switch (mode) {
+    case 'bar':
+      return <BarScreen points={next.toOpen} back={back} />;
+    case 'pick':
+      return <PickScreen next={next} touched={touched} back={back} />;
+    case 'powerUp':
       return <PowerUpScreen next={next} go={setMode} pick={pick} />;
   }
+}
+
+/** Shows only where thinking takes long enough to be noticed. */
+const Patience = chakra('div', { base: { animation: 'arrive 160ms ease-out 250ms backwards' } });
+
+function Working() {
+  const t = useTraceWords();
+  return (
+    <Panel>
+      <PanelBody aria-busy>
+        <Patience>
+          <Text>{t('narrow.working')}</Text>
+        </Patience>
+      </PanelBody>
+    </Panel>
+  );
 }

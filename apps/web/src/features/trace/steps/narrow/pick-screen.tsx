@@ -52,7 +52,7 @@ export function PickScreen({ next, touched, back }: PickScreenProps) {
     [context.open, pickable, picked],
   );
   const unchanged = context.circuit !== null && isUnchanged(context, context.circuit, open);
-  const { own } = useAdvice(question, unchanged ? null : open);
+  const { own, pending } = useAdvice(question, unchanged ? null : open);
   const figures = useOwnReason(own, next.advised);
   useShowOnDrawing(
     useMemo(() => ({ cut: picked, pickable, onPick: toggle }), [picked, pickable, toggle]),
@@ -98,7 +98,8 @@ export function PickScreen({ next, touched, back }: PickScreenProps) {
             <Callout tone="caution">{t('narrow.pickSame')}</Callout>
           ) : (
             <Text>
-              {picked.length === 0 ? t('narrow.pickNone') : names.parts(picked)}. {figures}
+              {picked.length === 0 ? t('narrow.pickNone') : names.parts(picked)}.{' '}
+              {!pending && figures}
             </Text>
           )}
         </div>
