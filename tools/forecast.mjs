@@ -22,13 +22,15 @@ async function libraries() {
 const here =
   process.env.npm_lifecycle_event === 'forecast' ? (process.env.INIT_CWD ?? '.') : process.cwd();
 
-function readPlan(file, { readHarnessText }) {
-  let text;
+function textIn(file) {
   try {
-    text = readFileSync(resolve(here, file), 'utf8');
+    return readFileSync(resolve(here, file), 'utf8');
   } catch (error) {
     throw new Mistake(`${file} cannot be read: ${error.code}.`, 'Name a file with a plan in it.');
   }
+}
+
+function planIn(file, text, { readHarnessText }) {
   const reading = readHarnessText(text);
   if (reading.ok) return reading.harness;
   throw new Mistake(
@@ -60,9 +62,10 @@ const rounded = (_, value) => (typeof value === 'number' ? Number(value.toFixed(
 async function main() {
   const options = readOptions(process.argv.slice(2));
   if (options.help) return say(usage);
+  const texts = options.files.map((file) => ({ file, text: textIn(file) }));
   const tools = await libraries();
-  const plans = options.files.map((file) => ({ file, harness: readPlan(file, tools) }));
   // All of it is looked over before anything is printed.
+  const plans = texts.map(({ file, text }) => ({ file, harness: planIn(file, text, tools) }));
   const jobs = plans.flatMap(({ file, harness }) =>
     treesOf(file, harness, options.circuit, tools).map((job) => ({ file, ...job })),
   );

@@ -39,6 +39,7 @@ export class Odds {
   /** The probability that a short is among the energised sections, if any is left. O(sections + terms). */
   lit(energised: readonly boolean[]): number {
     this.sumDark(energised);
+    if (this.total === 0) return 0;
     return rounded(1 - totalOf(this.terms, this.dark) / this.total);
   }
 

@@ -13,7 +13,7 @@ export function likeliest(standing: Standing, odds: Odds): Suspect {
   const { belief, tree, hunt } = standing;
   const joined = groups(standing);
   const bestAt = belief.inQuestion[0] ?? 0;
-  let best: Suspect = { sections: [], probability: -1 };
+  let best: Suspect = { sections: [], probability: 0 };
   for (const sections of joined.values()) {
     const [first] = sections;
     if (first === undefined) continue;

@@ -30,5 +30,5 @@ export function targetOf({ tree, belief, readings, several }: Standing): Target 
     within = reading;
   }
   const sum = shares.reduce((total, each) => total + each, 0);
-  return { shares: shares.map((each) => each / sum), within };
+  return { shares: sum > 0 ? shares.map((each) => each / sum) : shares, within };
 }
