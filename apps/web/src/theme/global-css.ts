@@ -22,7 +22,8 @@ export const globalCss = defineGlobalStyles({
     _motionReduce: {
       animationDuration: '0.01ms !important',
       animationIterationCount: '1 !important',
-      transitionDuration: '0.01ms !important',
+      // A short duration would make every change of every property of every element a transition.
+      transition: 'none !important',
       scrollBehavior: 'auto !important',
     },
   },
