@@ -3,14 +3,18 @@ import userEvent from '@testing-library/user-event';
 import { createMemoryRouter, RouterProvider } from 'react-router-dom';
 import { Providers } from '../app/providers';
 import { routes } from '../app/routes';
+import { PlannerContext } from '../lib/planner';
+import { plannerInPlace } from './planner-in-place';
 
 /** Opens the whole program at an address, as a browser would. */
-export function renderAt(path: string) {
+export function renderAt(path: string, { planner = plannerInPlace } = {}) {
   const router = createMemoryRouter(routes, { initialEntries: [path] });
   const view = render(
-    <Providers>
-      <RouterProvider router={router} />
-    </Providers>,
+    <PlannerContext value={planner}>
+      <Providers>
+        <RouterProvider router={router} />
+      </Providers>
+    </PlannerContext>,
   );
   const where = () => router.state.location.pathname + router.state.location.search;
   return { ...view, user: userEvent.setup(), where, router };

@@ -19,6 +19,7 @@ import {
 import { PlanPicture } from '../../ui/plan-picture';
 import { CircuitTable } from './circuit-table';
 import { downloadPlan } from './download-plan';
+import { ForecastTable } from './forecast/forecast-table';
 import { PartTable } from './part-table';
 import { RunTable } from './run-table';
 
@@ -66,6 +67,7 @@ export function PlanPage() {
         <PlanPicture harness={harness} />
       </Panel>
       <CircuitTable harness={harness} />
+      <ForecastTable harness={harness} />
       <PartTable harness={harness} />
       <RunTable harness={harness} />
     </Page>

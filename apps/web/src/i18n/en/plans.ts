@@ -49,6 +49,28 @@ export default {
   from: 'From',
   to: 'To',
   runLength: 'Length',
+  forecast: {
+    title: 'What finding a short will take',
+    lead: 'From the first power-up until one section is left and everything is plugged in again, for one short that always shows.',
+    circuit: 'Circuit',
+    expected: 'Average',
+    worst: 'Worst',
+    powerUps: 'Power-ups',
+    limit: 'Limit',
+    proven: 'Proven best:',
+    oneByOne: 'One by one',
+    halving: 'Halving',
+    minutes: '{{minutes}} min',
+    working: 'Working…',
+    missing: 'Not worked out',
+    nothingToPart: 'Nothing to unplug',
+    aboutLimit: 'Limit: no order of work can beat this on average.',
+    aboutProof: 'Proven best: the average reaches the limit.',
+    aboutHabits:
+      'One by one: unplugging whatever is easiest, one point at a time. Halving: parting what is left into halves by number.',
+    aboutTimes:
+      'Reckoned with {{powerSeconds}} s a power-up, power switched at the front, {{walkSecondsPerMetre}} s for each metre walked, and a feed that resets at once. A trace reckons with its own feed.',
+  },
   importTitle: 'Import a plan',
   importRevisionTitle: 'New revision of {{name}}',
   importLead:
