@@ -4,7 +4,7 @@ import { exactCases, largeCases } from '@lampwright/harness/testing';
 import { arbitraryQuestion } from '../testing/arbitraryQuestion';
 import { settings } from '../testing/settings';
 import { DEFAULT_TIMING } from '../timing';
-import type { Hunt, Timing } from '../types';
+import type { Hunt, HuntPlanner, Timing } from '../types';
 import { createHuntPlanner } from '../uncertain/createHuntPlanner';
 import { drawShorts } from './drawShorts';
 import { playHunt, type PlayedHunt } from './playHunt';
@@ -23,10 +23,13 @@ interface Trace {
   maxFaults?: number;
 }
 
-function play({ tree, timing, shorts, seed, detection = 1, maxFaults = 3 }: Trace): PlayedHunt {
+function play(
+  { tree, timing, shorts, seed, detection = 1, maxFaults = 3 }: Trace,
+  player: HuntPlanner = planner,
+): PlayedHunt {
   const start: Hunt = { tree, readings: [], options: { detection, maxFaults }, open: [], timing };
   const trailer = new SimulatedTrailer(tree, shorts, detection, seededRandom(seed));
-  return playHunt(start, trailer, planner);
+  return playHunt(start, trailer, player);
 }
 
 /** Pairs of neighbouring readings in which a state that overloaded was powered again with nothing changed. */
@@ -46,10 +49,11 @@ describe.each([...exactCases, ...largeCases])('several shorts on $name', ({ harn
 
   it.each(settings)('are all found where readings are true, $name', ({ timing }) => {
     const random = seededRandom(tree.sections.length);
+    const player = remembered(planner);
     for (const count of [2, 3]) {
       for (let run = 0; run < runs; run += 1) {
         const shorts = drawShorts(tree, count, random);
-        const played = play({ tree, timing, shorts, seed: run });
+        const played = play({ tree, timing, shorts, seed: run }, player);
         expect(played).toMatchObject({ finished: true, missed: [] });
         expect(played.namings.map(({ right }) => right)).toEqual(shorts.map(() => true));
         expect(poweredAgain(played)).toBe(0);

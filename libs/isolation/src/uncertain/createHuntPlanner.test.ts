@@ -81,6 +81,22 @@ describe('several shorts', () => {
     });
   });
 
+  it.each([
+    // Clean power-ups in which a short that is there would have shown with 95 %: recomputed, ln 0.05 / ln(1 - d).
+    { detection: 0.5, proofs: 5 },
+    { detection: 0.7, proofs: 3 },
+    { detection: 0.9, proofs: 2 },
+    { detection: 0.95, proofs: 1 },
+    { detection: 0.98, proofs: 1 },
+  ])('are proven gone $proofs times where they show $detection of the time', (each) => {
+    const kinds = Array.from({ length: each.proofs + 1 }, (_, times) => {
+      const readings = [...before, ...Array.from({ length: times }, () => holds())];
+      const detecting = { ...options, detection: each.detection };
+      return planOf(star(3), { options: detecting, mended, readings }).kind;
+    });
+    expect(kinds).toEqual([...Array.from({ length: each.proofs }, () => 'powerUp'), 'clear']);
+  });
+
   it('are hunted on with what is known: what held stays clear, what the mended one hid does not', () => {
     const { likeliest, open } = adviceOn(star(3), {
       options,

@@ -6,6 +6,9 @@ import { speaking } from './speaking';
 /** From here on a probability stands for certainty, after rounding. */
 const CERTAIN = 1 - 1e-9;
 
+/** Keeps a doubt of exactly one in twenty from being too much by rounding. */
+const ROUNDING = 1e-12;
+
 /** Where a hunt stops when its readings may miss. Common practice, no source. */
 export const STOPS_AT = 0.95;
 
@@ -24,7 +27,7 @@ export interface Standing {
   sets: WeighedSets;
   /** Probability that no short is left: above 0 only after a repair with no overload since. */
   noneLeft: number;
-  /** Whether the circuit has held with all that is in question energised since the last repair. */
+  /** Whether the circuit has held often enough since the last repair that a short left would have shown. */
   proven: boolean;
   /** The probability that is enough. */
   stopsAt: number;
@@ -50,6 +53,7 @@ export function standingOf(hunt: Hunt): Standing {
   const now = { detection, maxFaults: Math.max(1, left) };
   const sets = weighSets(tree, readings, now);
   const some = left > 0 || !mayBeNone ? ANOTHER_SHORT_FACTOR * sets.total : 0;
+  const stopsAt = hunt.confidence ?? (detection < 1 ? STOPS_AT : CERTAIN);
   return {
     hunt,
     detection,
@@ -59,16 +63,26 @@ export function standingOf(hunt: Hunt): Standing {
     belief: believe(tree, readings, now),
     sets,
     noneLeft: mayBeNone ? 1 / (1 + some) : 0,
-    proven: provenClear(hunt, tree),
-    stopsAt: hunt.confidence ?? (detection < 1 ? STOPS_AT : CERTAIN),
+    proven: provenClear(hunt, tree, detection, stopsAt),
+    stopsAt,
   };
 }
 
-function provenClear({ readings, mended = [] }: Hunt, tree: SectionTree): boolean {
+/**
+ * Whether a short that is left would have shown by now: with everything that can be short energised, the circuit has
+ * held so often since the last repair that all of these readings miss one with no more than the doubt allowed.
+ */
+function provenClear(
+  { readings, mended = [] }: Hunt,
+  tree: SectionTree,
+  detection: number,
+  stopsAt: number,
+): boolean {
   const since = mended.reduce((latest, { after }) => Math.max(latest, after), 0);
-  return readings.slice(since).some(({ open, outcome }) => {
+  const held = readings.slice(since).filter(({ open, outcome }) => {
     if (outcome === 'overload') return false;
     const energised = energisedSections(tree, open);
     return tree.sections.every(({ index, probability }) => probability === 0 || energised[index]);
   });
+  return held.length > 0 && (1 - detection) ** held.length <= 1 - stopsAt + ROUNDING;
 }
