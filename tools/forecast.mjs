@@ -80,6 +80,8 @@ async function main() {
 }
 
 checkNode();
+// A reader like `head` closes the pipe once it has seen enough.
+process.stdout.on('error', (error) => process.exit(error.code === 'EPIPE' ? 0 : 1));
 try {
   await main();
 } catch (error) {
