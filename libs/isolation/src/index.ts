@@ -68,5 +68,6 @@ export { createPlanner, plan, QUICK_STEPS, THOROUGH_STEPS } from './planner';
 export type { PlannerOptions } from './planner';
 export { DEFAULT_TIMING } from './timing';
 export type * from './types';
+export { beliefIn } from './uncertain/beliefIn';
 export { createHuntPlanner } from './uncertain/createHuntPlanner';
 export { STOPS_AT } from './uncertain/standing';

@@ -5,15 +5,16 @@ import type { Hunt, HuntAdvice, HuntPlan, HuntPlanner, Planner } from '../types'
 import { bestChoice } from './choices';
 import { expectedBits } from './information';
 import { likeliest } from './likeliest';
-import { plainChoice } from './plainChoice';
 import { Odds } from './Odds';
+import { plainChoice } from './plainChoice';
 import { standingOf, type Standing } from './standing';
 
 /**
- * A planner for hunts in which readings may miss a short or several shorts may be there: each power-up is the one that
- * tells the most bits a second, which may be the last one over again. A section counts as found at the hunt's
- * confidence. After a repair everything is closed and powered until an overload says that another short is left, or
- * enough readings that none is.
+ * A planner for hunts in which readings may miss a short or several shorts may be there. As long as readings that held
+ * can be trusted it hunts one of them as the planner of one short that always shows would, with the others kept dark;
+ * otherwise each power-up is the one that tells the most bits a second, which may be the last one over again. A section
+ * counts as found at the hunt's confidence. After a repair everything is closed and powered until an overload says that
+ * another short is left, or enough readings that none is.
  */
 export function createHuntPlanner(options: PlannerOptions = {}): HuntPlanner {
   return huntPlannerFrom(createPlanner(options));
@@ -29,8 +30,9 @@ function planHunt(hunt: Hunt, plain: Planner): HuntPlan {
   const { belief, noneLeft, stopsAt } = standing;
   // Who believes in a single short has found it; anyone else sees the circuit hold once more.
   const single = (hunt.options.maxFaults ?? 1) === 1;
-  if (noneLeft >= stopsAt && (single || standing.proven))
+  if (noneLeft >= stopsAt && (single || standing.proven)) {
     return { kind: 'clear', confidence: noneLeft, ...ending(standing) };
+  }
   if (noneLeft > 0) return { kind: 'powerUp', advice: proving(standing) };
   if (belief.contradicted) return { kind: 'contradicted' };
   const odds = new Odds(standing);

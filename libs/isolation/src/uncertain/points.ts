@@ -20,10 +20,10 @@ export interface HuntPoints {
   blocking: SeparablePoint[];
 }
 
-/** Sorts the points. Sections at less than this are not in question here: no power-up is made for them. */
+/** Sections at less than this are not in question here: no power-up is made for them. */
 const WORTH_ASKING = 1e-6;
 
-/** O(sections + open). */
+/** Sorts the points. O(sections + open). */
 export function pointsOfHunt({ hunt, tree, belief }: Standing): HuntPoints {
   const { timing } = hunt;
   const open = new Set(hunt.open);

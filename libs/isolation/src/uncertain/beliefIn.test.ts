@@ -4,7 +4,7 @@ import { arbitraryQuestion } from '../testing/arbitraryQuestion';
 import { pointId } from '../testing/trees';
 import { DEFAULT_TIMING } from '../timing';
 import type { Hunt } from '../types';
-import { standingOf } from './standing';
+import { beliefIn } from './beliefIn';
 
 /**
  * The same by listing every set of shorts with the mended ones among them, and multiplying its prior with the
@@ -80,7 +80,7 @@ describe('what is known in a hunt', () => {
           };
           const expected = listed(hunt);
           fc.pre(expected.total > 0);
-          const { noneLeft, belief } = standingOf(hunt);
+          const { noneLeft, belief } = beliefIn(hunt);
           expect(noneLeft).toBeCloseTo(expected.none, 9);
           if (expected.none > 1 - 1e-9) return;
           compared += 1;
