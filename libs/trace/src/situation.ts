@@ -1,4 +1,10 @@
-import { sectionTree, type PartId, type PlaceRef, type SectionTree } from '@lampwright/harness';
+import {
+  sectionTree,
+  type PartId,
+  type PlaceRef,
+  type SectionTree,
+  type SeparablePoint,
+} from '@lampwright/harness';
 import {
   believe,
   type Belief,
@@ -11,6 +17,7 @@ import { countingPowerUps, readingOf } from './countingReadings';
 import { focus } from './focus';
 import { samePlace } from './places';
 import { placesCleared, placesInQuestion, type RatedPlace } from './ratedPlaces';
+import { sharedFactor } from './sharedPlaces';
 import type { TraceContext } from './state';
 
 /** Where the narrowing of one circuit stands, computed from the context alone. */
@@ -89,8 +96,26 @@ function questionOf(
   belief: Belief,
   readings: readonly Reading[],
 ): Question {
-  const probabilities = focus(tree, belief, readings, context.maxFaults);
-  return { tree, probabilities, open: context.open, timing: timingOf(context) };
+  const last = context.powerUps.findLast(({ circuit }) => circuit === tree.circuit);
+  return {
+    tree,
+    probabilities: focus(tree, belief, readings, context.maxFaults),
+    open: context.open,
+    elsewhere: openElsewhere(context, tree),
+    // Before its first power-up of the narrowing a circuit was powered with everything connected.
+    poweredWith: last?.open ?? [],
+    timing: timingOf(context),
+  };
+}
+
+/** What is open on other circuits: to be closed in the end too. */
+function openElsewhere(context: TraceContext, tree: SectionTree): SeparablePoint[] {
+  const own = new Set(tree.sections.map(({ point }) => point?.partId));
+  return context.record.plan.harness.parts.flatMap(({ id, at, separable }) =>
+    separable && context.open.includes(id) && !own.has(id)
+      ? [{ partId: id, ...separable, along: at.along }]
+      : [],
+  );
 }
 
 /** How the shop's detection probabilities apply now. */
@@ -122,9 +147,10 @@ function treeOf(
   circuit: string,
   notSeparable: ReadonlySet<PartId>,
 ): SectionTree {
+  const shared = sharedFactor(context);
   return sectionTree(context.record.plan.harness, circuit, {
     notSeparable,
-    factor: (ref) => factorOf(context, ref),
+    factor: (ref) => factorOf(context, ref) * shared(ref),
   });
 }
 
