@@ -5,14 +5,17 @@ import { createBrowserRouter, RouterProvider } from 'react-router-dom';
 import { Providers } from './app/providers';
 import { routes } from './app/routes';
 import './i18n/i18n';
+import { PlannerContext, plannerInWorkers } from './lib/planner';
 
 const root = document.getElementById('root');
 if (!root) throw new Error('index.html has no #root.');
 
 createRoot(root).render(
   <StrictMode>
-    <Providers>
-      <RouterProvider router={createBrowserRouter(routes)} />
-    </Providers>
+    <PlannerContext value={plannerInWorkers()}>
+      <Providers>
+        <RouterProvider router={createBrowserRouter(routes)} />
+      </Providers>
+    </PlannerContext>
   </StrictMode>,
 );

@@ -9,11 +9,20 @@ import { TraceLayout } from './layout/trace-layout';
 import { Trouble } from './layout/trouble';
 import { ReplayScreen } from './replay/replay-screen';
 import { StepPanel } from './steps/step-panel';
+import { AdviserProvider } from './store/adviser-context';
 import { TraceSessionProvider } from './store/trace-session';
 import type { TraceStore } from './store/trace-store';
 
 /** A trace that this person works on. */
 export function TraceScreen({ store }: { store: TraceStore }) {
+  return (
+    <AdviserProvider>
+      <Screens store={store} />
+    </AdviserProvider>
+  );
+}
+
+function Screens({ store }: { store: TraceStore }) {
   const actor = useSyncExternalStore(store.subscribe, store.getActor);
   const session = useMemo(() => ({ store, actor }), [store, actor]);
   const [replaying, setReplaying] = useState(false);

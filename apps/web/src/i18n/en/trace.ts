@@ -385,6 +385,7 @@ export default {
     damageHelp: 'That place counts as far likelier from now on.',
     damageDone: 'Damage noted at {{place}}.',
     working: 'Working out the next power-up…',
+    weighing: 'Working out what that is worth…',
   },
   contradiction: {
     title: 'The readings do not fit together',

@@ -1,14 +1,11 @@
 import { createContext, useContext } from 'react';
-import { createWorkerClient } from './planner-worker-client';
 import type { PlannerClient } from './planner-calls';
 
-const worker = createWorkerClient(
-  () => new Worker(new URL('./planner.worker.ts', import.meta.url), { type: 'module' }),
-);
-
-/** The planner in its worker; tests hand in one that answers in place. */
-export const PlannerContext = createContext<PlannerClient>(worker);
+/** The planner of this program: its workers in a browser, one that answers in place in tests. */
+export const PlannerContext = createContext<PlannerClient | null>(null);
 
 export function usePlanner(): PlannerClient {
-  return useContext(PlannerContext);
+  const planner = useContext(PlannerContext);
+  if (!planner) throw new Error('usePlanner is used outside of a PlannerContext.');
+  return planner;
 }

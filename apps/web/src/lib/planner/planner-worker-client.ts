@@ -1,52 +1,31 @@
-import type { PlannerAnswer, PlannerArguments, PlannerCall, PlannerClient } from './planner-calls';
-import type { PlannerRequest, PlannerResponse } from './planner-messages';
+import type {
+  AskOptions,
+  PlannerAnswer,
+  PlannerArguments,
+  PlannerCall,
+  PlannerClient,
+} from './planner-calls';
+import { WorkerLane, type PlannerPort } from './worker-lane';
 
-/** As much of a worker as the client needs. */
-export interface PlannerPort {
-  postMessage(request: PlannerRequest): void;
-  onmessage: ((event: MessageEvent<PlannerResponse>) => void) | null;
-  onerror: ((event: ErrorEvent) => void) | null;
-}
-
-interface Waiting {
-  resolve(value: unknown): void;
-  reject(error: Error): void;
-}
-
-/** A planner in a worker, started with its first call. Calls are answered in the order they are made. */
+/**
+ * A planner in two workers: one for what a person waits for, one for what only sharpens it, so that a long thought
+ * never stands before a quick answer. A long thought that nobody wants any more is broken off.
+ */
 export function createWorkerClient(start: () => PlannerPort): PlannerClient {
-  const waiting = new Map<number, Waiting>();
-  let port: PlannerPort | null = null;
+  const foreground = new WorkerLane(start, false);
+  const background = new WorkerLane(start, true);
   let last = 0;
-
-  const opened = (): PlannerPort => {
-    const made = start();
-    made.onmessage = ({ data }) => {
-      const asked = waiting.get(data.id);
-      waiting.delete(data.id);
-      if ('error' in data) asked?.reject(new Error(data.error));
-      else asked?.resolve(data.value);
-    };
-    // The worker itself could not be loaded or died: whoever waits is told, and the next call starts another.
-    made.onerror = ({ message }) => {
-      port = null;
-      const all = [...waiting.values()];
-      waiting.clear();
-      all.forEach(({ reject }) => reject(new Error(message || 'The planner did not start.')));
-    };
-    return made;
-  };
-
   return {
-    ask: <Name extends PlannerCall>(name: Name, ...args: PlannerArguments<Name>) =>
-      new Promise<PlannerAnswer<Name>>((resolve, reject) => {
-        port ??= opened();
-        last += 1;
-        waiting.set(last, {
-          resolve: (value) => resolve(value as PlannerAnswer<Name>),
-          reject,
-        });
-        port.postMessage({ id: last, name, args });
-      }),
+    ask: <Name extends PlannerCall>(
+      name: Name,
+      args: PlannerArguments<Name>,
+      { background: later = false, signal }: AskOptions = {},
+    ) => {
+      last += 1;
+      const lane = later ? background : foreground;
+      const answer = lane.ask({ id: last, name, args }, signal);
+      return answer as Promise<PlannerAnswer<Name>>;
+    },
+    warm: () => foreground.warm(),
   };
 }

@@ -16,11 +16,14 @@ const figures: CircuitForecast = {
   halfByCountSeconds: 350,
 };
 
+type Asked = [tree: { circuit: CircuitId }, timing: unknown, steps: number];
+
 /** A planner that answers with `answer` and notes what it was asked. */
 function noting(answer: (circuit: CircuitId, steps: number) => Partial<CircuitForecast>) {
   const asked: [CircuitId, number][] = [];
   const planner = {
-    ask: async (_: 'forecast', tree: { circuit: CircuitId }, __: unknown, steps: number) => {
+    ask: async (_: 'forecast', [tree, , steps]: Asked, { signal }: { signal: AbortSignal }) => {
+      signal.throwIfAborted();
       asked.push([tree.circuit, steps]);
       return { ...figures, ...answer(tree.circuit, steps) };
     },
@@ -85,7 +88,8 @@ describe('forecasts of a plan', () => {
   it('are not asked for any more once nobody looks', async () => {
     const { planner, asked } = noting(() => ({}));
     const leaving = new AbortController();
-    await toldBy(planner, leaving, () => leaving.abort());
+    const told = toldBy(planner, leaving, () => leaving.abort());
+    await expect(told).rejects.toThrow(/aborted/);
     expect(asked).toHaveLength(1);
   });
 

@@ -33,28 +33,22 @@ interface Work {
  * Works out one circuit after the other, so that the first rows stand while the last are still thought about: a quick
  * round first, then a thorough one for what the quick one could not prove best.
  *
- * @throws what the planner throws; what was told before stands.
+ * @throws what the planner throws, and the signal's reason once nobody looks any more; what was told before stands.
  */
 export async function forecastCircuits(harness: Harness, work: Work): Promise<void> {
   const { planner, timing, signal, tell } = work;
-  /** `null` once nobody looks any more; then nothing else is asked either. */
-  const asked = async (tree: SectionTree, steps: number): Promise<CircuitForecast | null> => {
-    if (signal.aborted) return null;
-    const forecast = await planner.ask('forecast', tree, timing, steps);
-    return signal.aborted ? null : forecast;
-  };
+  const ask = (tree: SectionTree, steps: number) =>
+    planner.ask('forecast', [tree, timing, steps], { background: true, signal });
   const unproven: [tree: SectionTree, quick: CircuitForecast][] = [];
   for (const { id } of harness.circuits) {
     const tree = sectionTree(harness, id);
     if (tree.sections.length < 2) continue;
-    const quick = await asked(tree, QUICK_STEPS);
-    if (!quick) return;
+    const quick = await ask(tree, QUICK_STEPS);
     tell(id, quick);
     if (!quick.proven) unproven.push([tree, quick]);
   }
   for (const [tree, quick] of unproven) {
-    const thorough = await asked(tree, THOROUGH_STEPS);
-    if (!thorough) return;
+    const thorough = await ask(tree, THOROUGH_STEPS);
     tell(tree.circuit, sharper(quick, thorough));
   }
 }

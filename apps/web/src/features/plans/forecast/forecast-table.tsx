@@ -15,7 +15,13 @@ const Notes = chakra('ul', {
   base: { color: 'fg.muted', fontSize: 'sm', listStyle: 'none', maxW: '90ch' },
 });
 const Limit = chakra('span', {
-  base: { display: 'inline-flex', alignItems: 'center', gap: '1.5', '& svg': { color: 'pine.fg' } },
+  base: {
+    display: 'inline-flex',
+    alignItems: 'center',
+    verticalAlign: 'top',
+    gap: '1.5',
+    '& svg': { color: 'pine.fg' },
+  },
 });
 /** Most circuits are worked out before anyone could read this, so it takes a moment to appear. */
 const Later = chakra('span', {

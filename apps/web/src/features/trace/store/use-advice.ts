@@ -1,62 +1,70 @@
 import type { PartId } from '@lampwright/harness';
-import type { Advice, Question } from '@lampwright/isolation';
-import { useEffect, useState } from 'react';
-import { usePlanner } from '../../../lib/planner';
-import { planFor } from './plan-for';
+import type { Question } from '@lampwright/isolation';
+import { useCallback, useEffect, useMemo, useState, useSyncExternalStore } from 'react';
+import type { OwnFigures, Standing } from './adviser';
+import { useAdviser } from './adviser-context';
 import { samePoints } from './same-points';
 
-/** The planner's answers to one question. */
-export interface Advised {
-  /** The best power-up that it found; `null` without a question, when one section is left, or while it is thought. */
-  advised: Advice | null;
-  /** The figures of the points that the person picked; `null` where those are the advised ones, or while they are reckoned. */
-  own: Advice | null;
-  /** True while the planner is at it. */
-  pending: boolean;
+/** Why there is no answer, and the way to ask once more. */
+export interface Unanswered {
+  error: unknown;
+  retry: () => void;
 }
 
-/** The one door to the planner, which works in a worker. An answer to an earlier question is never shown for a later one. */
-export function useAdvice(question: Question | null, chosen: readonly PartId[] | null): Advised {
-  const planner = usePlanner();
-  const [plan, setPlan] = useState<Answer<Question, Advice | null> | null>(null);
-  const [figures, setFigures] = useState<Answer<readonly PartId[], Advice | null> | null>(null);
-  const [failure, setFailure] = useState<{ error: unknown } | null>(null);
+export interface Answer<Value> {
+  /** `null` without a question, and until there is an answer. */
+  value: Value | null;
+  failure: Unanswered | null;
+}
 
+/** What the planner says to a question. */
+export function useAdvice(question: Question | null): Answer<Standing> {
+  const adviser = useAdviser();
+  const value = useSyncExternalStore(adviser.subscribe, () =>
+    question ? adviser.standing(question) : null,
+  );
+  const work = useMemo(
+    () => question && ((signal: AbortSignal) => adviser.consider(question, signal)),
+    [adviser, question],
+  );
+  return { value, failure: useWork(work) };
+}
+
+/** What points of the person's own are worth; nothing where they are the advised ones. */
+export function useOwnFigures(
+  question: Question | null,
+  chosen: readonly PartId[] | null,
+): Answer<OwnFigures> & { followed: boolean } {
+  const adviser = useAdviser();
+  const advised = useSyncExternalStore(adviser.subscribe, () =>
+    question ? (adviser.standing(question)?.advice ?? null) : null,
+  );
+  const open = chosen && advised && !samePoints(chosen, advised.open) ? chosen : null;
+  const value = useSyncExternalStore(adviser.subscribe, () =>
+    question && open ? adviser.own(question, open) : null,
+  );
+  const work = useMemo(
+    () => question && open && ((signal: AbortSignal) => adviser.weigh(question, open, signal)),
+    [adviser, question, open],
+  );
+  return { value, failure: useWork(work), followed: open === null };
+}
+
+/** Does work while its screen stands; the newest work alone counts. */
+function useWork(work: ((signal: AbortSignal) => Promise<void>) | null): Unanswered | null {
+  const [attempt, setAttempt] = useState(0);
+  const [failed, setFailed] = useState<{ work: unknown; error: unknown } | null>(null);
   useEffect(() => {
-    if (!question) return undefined;
-    return planFor(planner, question, {
-      tell: (advice) => setPlan({ asked: question, answer: advice }),
-      fail: (error) => setFailure({ error }),
+    if (!work) return undefined;
+    const leaving = new AbortController();
+    work(leaving.signal).catch((error: unknown) => {
+      if (!leaving.signal.aborted) setFailed({ work, error });
     });
-  }, [planner, question]);
-
-  const planned = plan !== null && plan.asked === question;
-  const advised = planned ? plan.answer : null;
-  const followed = !advised || !chosen || samePoints(chosen, advised.open);
-  const picked = followed ? null : chosen;
-  useEffect(() => {
-    if (!question || !picked) return undefined;
-    let current = true;
-    planner.ask('adviceFor', question, picked).then(
-      (answer) => current && setFigures({ asked: picked, answer }),
-      (error: unknown) => current && setFailure({ error }),
-    );
-    return () => {
-      current = false;
-    };
-  }, [planner, question, picked]);
-
-  // The nearest error boundary tells the person, as it does of all that goes wrong while a screen is made.
-  if (failure) throw failure.error;
-  const reckoned = picked !== null && figures !== null && figures.asked === picked;
-  return {
-    advised,
-    own: reckoned ? figures.answer : null,
-    pending: question !== null && (!planned || (picked !== null && !reckoned)),
-  };
-}
-
-interface Answer<Asked, Value> {
-  asked: Asked;
-  answer: Value;
+    return () => leaving.abort();
+  }, [work, attempt]);
+  const retry = useCallback(() => {
+    setFailed(null);
+    setAttempt((count) => count + 1);
+  }, []);
+  return failed !== null && failed.work === work ? { error: failed.error, retry } : null;
 }

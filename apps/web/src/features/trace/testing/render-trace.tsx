@@ -23,14 +23,17 @@ const session: SessionControl = {
 };
 
 /** The screens of a trace on the real machine and planner, and a server with the real rules. Taps are not slowed. */
-export async function renderTrace(record: TraceRecord, { pause = 0 } = {}) {
+export async function renderTrace(
+  record: TraceRecord,
+  { pause = 0, planner = plannerInPlace } = {},
+) {
   const server = fakeTraceServer(record);
   const { store } = await openStore(server.api, memoryKeeper(), record);
   render(
     <ChakraProvider value={system}>
       <SessionContext value={session}>
         <MemoryRouter>
-          <PlannerContext value={plannerInPlace}>
+          <PlannerContext value={planner}>
             <TapGuardProvider pause={pause}>
               <TraceScreen store={store} />
             </TapGuardProvider>

@@ -1,21 +1,19 @@
-import { chakra } from '@chakra-ui/react';
 import type { PartId } from '@lampwright/harness';
 import { useCallback, useState } from 'react';
-import { Panel, PanelBody, Text } from '../../controls/panel';
 import { useNextPowerUp } from '../../store/use-next-power-up';
-import { useTraceWords } from '../../words/use-trace-words';
 import { BarScreen } from './bar-screen';
 import { DamageScreen } from './damage-screen';
 import { ElseScreen } from './else-screen';
 import { FeedChangeScreen } from './feed-change-screen';
 import type { NarrowMode } from './narrow-mode';
+import { NoAdvice } from './no-advice';
 import { PickScreen } from './pick-screen';
 import { PlanWrongScreen } from './plan-wrong-screen';
 import { PowerUpScreen } from './power-up-screen';
 
 /** The next power-up, and what can be said instead of doing it. */
 export function DecidingScreens() {
-  const next = useNextPowerUp();
+  const { value: next, failure } = useNextPowerUp();
   const [mode, setMode] = useState<NarrowMode>('powerUp');
   const [touched, setTouched] = useState<PartId | null>(null);
   const pick = useCallback((point: PartId) => {
@@ -37,7 +35,7 @@ export function DecidingScreens() {
     case 'feed':
       return <FeedChangeScreen back={back} />;
   }
-  if (!next) return <Working />;
+  if (!next) return <NoAdvice failure={failure} />;
   switch (mode) {
     case 'bar':
       return <BarScreen points={next.toOpen} back={back} />;
@@ -46,20 +44,4 @@ export function DecidingScreens() {
     case 'powerUp':
       return <PowerUpScreen next={next} go={setMode} pick={pick} />;
   }
-}
-
-/** Shows only where thinking takes long enough to be noticed. */
-const Patience = chakra('div', { base: { animation: 'arrive 160ms ease-out 250ms backwards' } });
-
-function Working() {
-  const t = useTraceWords();
-  return (
-    <Panel>
-      <PanelBody aria-busy>
-        <Patience>
-          <Text>{t('narrow.working')}</Text>
-        </Patience>
-      </PanelBody>
-    </Panel>
-  );
 }

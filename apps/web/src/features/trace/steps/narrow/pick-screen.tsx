@@ -4,16 +4,16 @@ import { useCallback, useMemo, useState } from 'react';
 import { Callout } from '../../../../ui';
 import { ChoiceCard } from '../../controls/choice-card';
 import { FieldButton, GoBackButton, GoOnButton } from '../../controls/field-button';
-import { Ask, Panel, PanelAnswers, PanelBody, Row, Small, Stack, Text } from '../../controls/panel';
+import { Ask, Panel, PanelAnswers, PanelBody, Row, Small, Stack } from '../../controls/panel';
 import { StepHeading } from '../../controls/step-heading';
 import { useShowOnDrawing } from '../../layout/overlay';
 import { useRecord, useTraceContext } from '../../store/trace-session';
-import { useAdvice } from '../../store/use-advice';
+import { useOwnFigures } from '../../store/use-advice';
 import type { NextPowerUp } from '../../store/use-next-power-up';
 import { durationWords } from '../../words/duration-words';
 import { useNames } from '../../words/use-names';
 import { useTraceWords } from '../../words/use-trace-words';
-import { useOwnReason } from './use-reason';
+import { OwnReason } from './own-reason';
 import { usePoints } from './use-points';
 
 interface PickScreenProps {
@@ -52,8 +52,7 @@ export function PickScreen({ next, touched, back }: PickScreenProps) {
     [context.open, pickable, picked],
   );
   const unchanged = context.circuit !== null && isUnchanged(context, context.circuit, open);
-  const { own, pending } = useAdvice(question, unchanged ? null : open);
-  const figures = useOwnReason(own, next.advised);
+  const own = useOwnFigures(question, unchanged ? null : open);
   useShowOnDrawing(
     useMemo(() => ({ cut: picked, pickable, onPick: toggle }), [picked, pickable, toggle]),
   );
@@ -93,14 +92,15 @@ export function PickScreen({ next, touched, back }: PickScreenProps) {
         ))}
       </PanelBody>
       <PanelAnswers>
-        <div role="status">
+        <div role="status" aria-busy={!unchanged && !own.followed && !own.value}>
           {unchanged ? (
             <Callout tone="caution">{t('narrow.pickSame')}</Callout>
           ) : (
-            <Text>
-              {picked.length === 0 ? t('narrow.pickNone') : names.parts(picked)}.{' '}
-              {!pending && figures}
-            </Text>
+            <OwnReason
+              points={picked.length === 0 ? t('narrow.pickNone') : names.parts(picked)}
+              own={own}
+              advised={next.advised}
+            />
           )}
         </div>
         <Row>

@@ -14,7 +14,7 @@ export function Reason({ next }: { next: NextPowerUp }) {
   const t = useTraceWords();
   const why = useReason(next);
   const { advised, own } = next;
-  const shown = own ?? advised;
+  const shown = own?.advice ?? advised;
   return (
     <Words>
       <p>{why}</p>

@@ -1,7 +1,5 @@
-import { easiestFirstSeconds, type Advice } from '@lampwright/isolation';
-import { situation } from '@lampwright/trace';
-import { useMemo } from 'react';
-import { useTraceContext } from '../../store/trace-session';
+import type { Advice } from '@lampwright/isolation';
+import type { OwnFigures } from '../../store/adviser';
 import type { NextPowerUp } from '../../store/use-next-power-up';
 import { durationWords } from '../../words/duration-words';
 import { useTraceWords, type TraceWords } from '../../words/use-trace-words';
@@ -10,30 +8,26 @@ import { useTraceWords, type TraceWords } from '../../words/use-trace-words';
 const WORTH_SAYING = 15;
 
 /** Why the power-up on the screen, in one sentence or two, with its own numbers. */
-export function useReason({ advised, own }: NextPowerUp): string {
+export function useReason({ advised, easiestFirstSeconds, own }: NextPowerUp): string {
   const t = useTraceWords();
-  const question = useTraceContext((context) => situation(context)?.question ?? null);
-  const habit = useMemo(() => question && easiestFirstSeconds(question), [question]);
-  const ofOwn = useOwnReason(own, advised);
-  if (own) return ofOwn;
-  const extra = (habit ?? 0) - advised.expectedSeconds;
+  if (own) return ownReason(own, t);
+  const extra = easiestFirstSeconds - advised.expectedSeconds;
   if (extra < WORTH_SAYING) return splitWords(advised, t);
   return `${splitWords(advised, t)} ${t('narrow.oneByOne', { time: durationWords(extra, t) })}`;
 }
 
 /** What the person's own choice is worth beside the advice. */
-export function useOwnReason(own: Advice | null, advised: Advice): string {
-  const t = useTraceWords();
-  if (!own) return splitWords(advised, t);
-  const loss = own.expectedSeconds - advised.expectedSeconds;
-  const beside =
+export function ownReason({ advice, beside }: OwnFigures, t: TraceWords): string {
+  const loss = advice.expectedSeconds - beside.expectedSeconds;
+  const words =
     loss < WORTH_SAYING
       ? t('narrow.asGood')
       : t('narrow.against', { time: durationWords(loss, t) });
-  return `${splitWords(own, t)} ${beside}`;
+  return `${splitWords(advice, t)} ${words}`;
 }
 
-function splitWords(advice: Advice, t: TraceWords): string {
+/** How a power-up parts what is left, and what it costs. */
+export function splitWords(advice: Advice, t: TraceWords): string {
   const overload = Math.round(advice.overloadProbability * 100);
   const { overload: ifOverload, holds: ifHolds } = advice.seconds;
   const expected =
