@@ -21,12 +21,12 @@ Plays the planner against every section of every circuit as the hidden short, an
   --detect P                    probability that a short shows in one power-up, above 0 up to 1 (1); plays random traces
   --samples N                   random traces (1000)
   --seed N                      of the random traces (1)
-  --budget MS                   how long a decision may be thought about, roughly (100)
+  --budget MS                   how long a decision may be thought about, roughly (72)
   --deciles                     adds how sure and how right the namings of random traces were, in ten groups`;
 
 /**
  * Thinking is counted in steps, so that answers do not depend on the machine. So many take at most about a millisecond;
- * the planner's own default of 25,000 steps stands for 100 ms.
+ * the planner's own default of 18,000 steps stands for 72 ms.
  */
 const STEPS_PER_MILLISECOND = 250;
 

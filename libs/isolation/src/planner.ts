@@ -8,7 +8,7 @@ import { tellsMore } from './tellsMore';
 import type { Plan, Planner, Question } from './types';
 
 /** For an answer while the person waits: a few tens of milliseconds at 60 parts. */
-export const QUICK_STEPS = 25_000;
+export const QUICK_STEPS = 18_000;
 
 /** For an answer in the background, or for a forecast: about half a second at 60 parts. */
 export const THOROUGH_STEPS = 250_000;
