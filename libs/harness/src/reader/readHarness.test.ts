@@ -120,7 +120,8 @@ function damaged(): fc.Arbitrary<unknown> {
         const slots = slotsOf(document);
         const slot = slots[at % slots.length]!;
         const other = slots[twin % slots.length]!;
-        slot.owner[slot.key] = put === null ? structuredClone(other.owner[other.key]) : put;
+        // A copy: the same object put in twice could come to hold itself.
+        slot.owner[slot.key] = structuredClone(put === null ? other.owner[other.key] : put);
       }
       return document;
     });
