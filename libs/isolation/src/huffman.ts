@@ -3,20 +3,23 @@
  * the readings ask about (Huffman 1952). Weights need not sum to 1; zeros count for nothing. O(n log n).
  */
 export function huffmanLength(weights: Iterable<number>): number {
-  const leaves = [...weights].filter((weight) => weight > 0).sort((a, b) => a - b);
+  const leaves: number[] = [];
+  for (const weight of weights) if (weight > 0) leaves.push(weight);
+  leaves.sort((a, b) => a - b);
+  // Joined weights come out in ascending order, so two queues do instead of a heap (van Leeuwen 1976).
   const merged: number[] = [];
   let leaf = 0;
   let inner = 0;
-  const least = () => {
-    const fresh = leaves[leaf] ?? Infinity;
-    const old = merged[inner] ?? Infinity;
-    if (fresh <= old) leaf += 1;
-    else inner += 1;
-    return Math.min(fresh, old);
-  };
   let length = 0;
   for (let joins = leaves.length - 1; joins > 0; joins -= 1) {
-    const pair = least() + least();
+    let pair = 0;
+    for (let taken = 0; taken < 2; taken += 1) {
+      const fresh = leaves[leaf] ?? Infinity;
+      const old = merged[inner] ?? Infinity;
+      if (fresh <= old) leaf += 1;
+      else inner += 1;
+      pair += Math.min(fresh, old);
+    }
     merged.push(pair);
     length += pair;
   }

@@ -11,7 +11,7 @@ import type { Plan, Planner, Question } from './types';
 export const QUICK_STEPS = 18_000;
 
 /** For an answer in the background, or for a forecast: about half a second at 60 parts. */
-export const THOROUGH_STEPS = 250_000;
+export const THOROUGH_STEPS = 160_000;
 
 /** How much the planner may think. Steps are power-ups tried in thought, so that answers do not depend on a clock. */
 export interface PlannerOptions {

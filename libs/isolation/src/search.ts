@@ -1,20 +1,42 @@
+import type { Cells } from './cells';
 import { choicesOf } from './choices';
-import { exactLength } from './exact/exactFinding';
+import { Tails } from './exact/Tails';
 import type { Length, Policy } from './playOut';
 import { finalWalk, type Situation, type Step, type Workbench } from './situation';
-import { subCells } from './subCells';
 import type { Steps } from './steps';
 
 /** How widely a search looks. */
 export interface Breadth {
+  /** How many steps of a situation are ranked by play: those of the highest rate. */
+  tried: number;
   /** How many first steps are looked into. */
   first: number;
   /** At most so many points opened for one power-up. */
   mostNew: number;
-  /** How many choices are looked into at a later turn, by the number of cells in question. */
-  width: (count: number) => number;
-  /** From so many cells in question downwards the best play is searched out. */
+  /** How many choices are looked into at a later turn. */
+  width: number;
+  /** From so many cells in question downwards the best play is searched out; see `Tails.holds`. */
   exactFrom: number;
+}
+
+/** What searches of different breadth over the same cells find alike. */
+export class Memory {
+  readonly tails: Tails;
+  private readonly basic = new Map<number, Map<string, Length>[]>();
+
+  constructor(
+    cells: Cells,
+    readonly policies: readonly Policy[],
+  ) {
+    this.tails = new Tails(cells);
+  }
+
+  /** By base policy, of those with the same `exactFrom`: how long it plays from a situation. */
+  basicLengths(exactFrom: number): Map<string, Length>[] {
+    const known = this.basic.get(exactFrom) ?? this.policies.map(() => new Map<string, Length>());
+    this.basic.set(exactFrom, known);
+    return known;
+  }
 }
 
 /** A step and how long the best play found behind it is. */
@@ -37,11 +59,11 @@ export class Search {
 
   constructor(
     private readonly bench: Workbench,
-    private readonly policies: readonly Policy[],
+    private readonly memory: Memory,
     private readonly breadth: Breadth,
     private readonly steps: Steps,
   ) {
-    this.basic = policies.map(() => new Map());
+    this.basic = memory.basicLengths(breadth.exactFrom);
   }
 
   /**
@@ -63,7 +85,8 @@ export class Search {
 
   private value(situation: Situation): Length {
     if (situation.count <= 1) return this.end(situation);
-    if (situation.count <= this.breadth.exactFrom) return this.tail(situation);
+    const { tails } = this.memory;
+    if (tails.holds(situation, this.breadth.exactFrom)) return tails.length(situation, this.steps);
     const key = keyOf(situation);
     const known = this.values.get(key);
     if (known) return known;
@@ -71,7 +94,7 @@ export class Search {
     let first = true;
     this.lookInto(
       situation,
-      this.breadth.width(situation.count),
+      this.breadth.width,
       () => true,
       ({ length }) => {
         if (first || length.weighted < best.weighted) best = length;
@@ -83,42 +106,33 @@ export class Search {
   }
 
   private ranked(situation: Situation, most: number, allows: Allows): Played[] {
-    const steps = this.stepsOf(situation)
-      .filter(allows)
-      .map((step) => ({
-        step,
-        length: this.after(situation, step, (next) => this.basicLength(next)),
-      }));
+    const steps = this.stepsOf(situation, allows).map((step) => ({
+      step,
+      length: this.after(situation, step, (next) => this.basicLength(next)),
+    }));
     steps.sort((a, b) => a.length.weighted - b.length.weighted);
     return steps.slice(0, most);
   }
 
-  private stepsOf(situation: Situation): Step[] {
+  /** The steps of the choices of the highest rate; where walks are owed, a choice may be two of them. */
+  private stepsOf(situation: Situation, allows: Allows): Step[] {
     const steps: Step[] = [];
     const seen = new Set<string>();
-    for (const { open } of choicesOf(this.bench, situation, this.breadth.mostNew)) {
+    const { mostNew, tried } = this.breadth;
+    const choices = choicesOf(this.bench, situation, mostNew).sort((a, b) => b.rate - a.rate);
+    for (const { open } of choices) {
+      if (steps.length >= tried) break;
       const key = open.join();
       if (seen.has(key)) continue;
       seen.add(key);
       const step = this.bench.step(situation, open);
-      if (!step) continue;
+      if (!step || !allows(step)) continue;
       steps.push(step);
       const tidy = situation.spent > 0 && !step.tidies && this.bench.step(situation, open, true);
       if (tidy) steps.push(tidy);
     }
     this.steps.spend(steps.length);
     return steps;
-  }
-
-  /** The best play of a situation with so few cells that it is soon known. */
-  private tail(situation: Situation): Length {
-    const key = keyOf(situation);
-    const known = this.values.get(key);
-    if (known) return known;
-    const length = exactLength(subCells(this.bench.cells, situation), this.steps);
-    if (!length) throw new Error('two cells in question that no point parts');
-    this.values.set(key, length);
-    return length;
   }
 
   private end(situation: Situation): Length {
@@ -143,7 +157,7 @@ export class Search {
 
   private basicLength(situation: Situation): Length {
     let best: Length = { weighted: Infinity, worst: Infinity };
-    for (const [at, policy] of this.policies.entries()) {
+    for (const [at, policy] of this.memory.policies.entries()) {
       const length = this.played(situation, policy, this.basic[at] ?? new Map());
       if (length.weighted < best.weighted) best = length;
     }
@@ -152,7 +166,8 @@ export class Search {
 
   private played(situation: Situation, policy: Policy, known: Map<string, Length>): Length {
     if (situation.count <= 1) return this.end(situation);
-    if (situation.count <= this.breadth.exactFrom) return this.tail(situation);
+    const { tails } = this.memory;
+    if (tails.holds(situation, this.breadth.exactFrom)) return tails.length(situation, this.steps);
     const key = keyOf(situation);
     const before = known.get(key);
     if (before) return before;

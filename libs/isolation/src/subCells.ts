@@ -1,18 +1,17 @@
 import type { Cells } from './cells';
-import type { Situation } from './situation';
 
 /**
- * The cells of a situation as a question of their own. Trees that hang apart join in a new first cell that holds nothing.
- * O(cells of the situation).
+ * Some of the cells as a question of their own, with nothing open: a first cell that holds nothing, and on it the trees
+ * that hang apart. `place` says where each cell has gone. O(some).
  */
-export function subCells(cells: Cells, situation: Situation): Cells {
-  const place = new Map<number, number>();
-  const roots = situation.cells.filter((v) => !situation.cells.includes(cells.parent[v] ?? -1));
-  const joined = roots.length > 1 || situation.open.includes(roots[0] ?? -1);
-  const from = joined ? [-1, ...situation.cells] : [...situation.cells];
-  from.forEach((v, at) => place.set(v, at));
+export function subCells(
+  cells: Cells,
+  some: readonly number[],
+): { cells: Cells; place: ReadonlyMap<number, number> } {
+  const place = new Map(some.map((v, at) => [v, at + 1]));
+  const from = [-1, ...some];
   const pick = (values: Float64Array) => Float64Array.from(from, (v) => values[v] ?? 0);
-  return {
+  const few = {
     ...cells,
     size: from.length,
     parent: Int32Array.from(from, (v, at) =>
@@ -23,8 +22,11 @@ export function subCells(cells: Cells, situation: Situation): Cells {
     walk: pick(cells.walk),
     points: from.map((v) => cells.points[v] ?? null),
     section: Int32Array.from(from, (v) => cells.section[v] ?? -1),
-    open: situation.open.map((v) => place.get(v) ?? 0),
-    blockingWalk: situation.forced,
-    spentWalk: situation.spent,
+    open: [],
+    blocking: [],
+    spent: [],
+    blockingWalk: 0,
+    spentWalk: 0,
   };
+  return { cells: few, place };
 }

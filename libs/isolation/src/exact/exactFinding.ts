@@ -1,12 +1,10 @@
-import type { Cells } from '../cells';
 import type { Finding } from '../finding';
-import type { Length } from '../playOut';
 import { within, type Steps } from '../steps';
 import type { Situation, Step, Workbench } from '../situation';
 import { ExactSearch } from './exactSearch';
-import { bitsOf, masksOf, MOST_MASKED_CELLS, type Masks } from './masks';
+import { bitsOf, masksOf, MOST_MASKED_CELLS } from './masks';
 import type { Move } from './moves';
-import type { State } from './state';
+import { openingState } from './state';
 
 /**
  * The best play of all, or `null` when the question has too many cells, or more decisions to look at than its share
@@ -22,8 +20,9 @@ export function exactFinding(
 ): Finding | null {
   if (bench.cells.size > MOST_MASKED_CELLS) return null;
   const masks = masksOf(bench.cells);
-  const state = stateOf(masks);
-  const stepOf = ({ open, walk }: Move) => bench.step(situation, bitsOf(open), walk >= state.spent);
+  const { open, blockingWalk, spentWalk } = bench.cells;
+  const state = openingState(masks, open, blockingWalk, spentWalk);
+  const stepOf = (move: Move) => bench.step(situation, bitsOf(move.open), move.walk >= state.spent);
 
   return within(whole, share, (steps) => {
     const best = new ExactSearch(masks, steps).best(state, limit, (move) => {
@@ -33,25 +32,4 @@ export function exactFinding(
     const step = best && stepOf(best.move);
     return step && { step, length: best.length, optimal: true };
   });
-}
-
-/**
- * The length of the best play of all for a question of few cells.
- *
- * @throws StepsSpent when the steps do not suffice.
- */
-export function exactLength(cells: Cells, steps: Steps): Length | null {
-  const masks = masksOf(cells);
-  return new ExactSearch(masks, steps).length(stateOf(masks), Infinity);
-}
-
-function stateOf(masks: Masks): State {
-  const { open, blockingWalk, spentWalk } = masks.cells;
-  const rankOf = (walk: number) => masks.walkSeconds.indexOf(walk);
-  return {
-    set: masks.everything,
-    open: open.reduce((mask, v) => mask | (1 << v), 0),
-    forced: rankOf(blockingWalk),
-    spent: rankOf(spentWalk),
-  };
 }

@@ -94,10 +94,11 @@ export class ExactSearch {
   /** A bound below the weighted seconds of a state that a reading left. */
   private least(state: State): number {
     const { set, open, forced, spent } = state;
-    const { weight, useful, readings, nearest, count, far } = this.book.of(set);
+    const { weight, useful, nearest } = this.book.of(set);
     if (useful.length === 0) return weight * this.lastWalk(state);
     const before = this.known.get(keyOf(this.masks, state));
     if (before && 'length' in before) return before.length.weighted;
+    const { readings, count, far } = this.book.boundsOf(set);
     const { cells, walkSeconds } = this.masks;
     // With points open, the first power-up may do no more than close what is in the way.
     const inTheWay = walkSeconds[forced] ?? 0;

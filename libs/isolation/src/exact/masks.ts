@@ -24,9 +24,16 @@ export interface Masks {
   walkSeconds: number[];
 }
 
-/** O(cells^2). */
-export function masksOf(cells: Cells): Masks {
-  const { size, parent, weight, walk, blockingWalk, spentWalk } = cells;
+/** All walks of a question by rank; see `Masks.walkSeconds`. O(cells log cells). */
+export function walkSecondsOf({ walk, blockingWalk, spentWalk }: Cells): number[] {
+  const walks = [...new Set([blockingWalk, spentWalk, ...walk.subarray(1)])].sort((a, b) => a - b);
+  // Rank 0 is no walk at all; with power at hand no walk counts.
+  return walks.some((seconds) => seconds > 0) ? [0, ...walks] : [0];
+}
+
+/** `walkSeconds` may hold more walks than those of the cells. O(cells^2). */
+export function masksOf(cells: Cells, walkSeconds = walkSecondsOf(cells)): Masks {
+  const { size, parent, weight, walk } = cells;
   const beyond = new Int32Array(size);
   let everything = 0;
   for (let v = size - 1; v >= 0; v -= 1) {
@@ -38,9 +45,6 @@ export function masksOf(cells: Cells): Masks {
       beyond[up] = (beyond[up] ?? 0) | (beyond[v] ?? 0);
     }
   }
-  const walks = [...new Set([blockingWalk, spentWalk, ...walk.subarray(1)])].sort((a, b) => a - b);
-  // Rank 0 is no walk at all; with power at hand no walk counts.
-  const walkSeconds = walks.some((seconds) => seconds > 0) ? [0, ...walks] : [0];
   return {
     cells,
     everything,

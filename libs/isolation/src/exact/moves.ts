@@ -1,5 +1,5 @@
 import type { Steps } from '../steps';
-import type { SetBook, SetFacts } from './setFacts';
+import type { SetBook, SetBounds, SetFacts } from './setFacts';
 import type { State } from './state';
 
 /** One power-up of the exact search. */
@@ -26,6 +26,7 @@ export interface Move {
 export class MoveList {
   private readonly found: Move[] = [];
   private readonly facts: SetFacts;
+  private readonly bounds: SetBounds;
   private readonly floor: number;
 
   constructor(
@@ -35,8 +36,8 @@ export class MoveList {
     private readonly steps: Steps,
   ) {
     this.facts = book.of(state.set);
-    const { readings, nearest, count } = this.facts;
-    this.floor = readings + nearest * count;
+    this.bounds = book.boundsOf(state.set);
+    this.floor = this.bounds.readings + this.facts.nearest * this.bounds.count;
   }
 
   list(): Move[] {
@@ -90,7 +91,8 @@ export class MoveList {
   /** Least weighted seconds of any play that begins like the draft. */
   private bound({ open, hands, walk }: Draft): number {
     const { set, open: before, spent } = this.state;
-    const { weight, nearest, far } = this.facts;
+    const { weight, nearest } = this.facts;
+    const { far } = this.bounds;
     const { walkSeconds } = this.book.masks;
     const seconds = walkSeconds[walk] ?? 0;
     // What is open then takes one more walk to close; so does what is spent, unless this walk goes out to it.

@@ -2,30 +2,39 @@ import { entropyBits, huffmanLength } from '../huffman';
 import type { Steps } from '../steps';
 import { bitsOf, type Masks } from './masks';
 
-/** What can be said of a set of cells in question whatever is open. All seconds are weighted by probability. */
+/** What a set of cells in question is made of. */
 export interface SetFacts {
   weight: number;
-  /** Least seconds of the readings, overloads included. */
-  readings: number;
-  /** Least number of readings, weighted. */
-  count: number;
   /** Points with cells of the set on both sides. */
   useful: number[];
-  usefulMask: number;
   /** The shortest walk to a useful point. */
   nearest: number;
-  /** Least seconds of walking beyond `nearest` when nothing is open. */
+}
+
+/** What telling the cells of a set apart takes at least, whatever is open. Weighted by probability. */
+export interface SetBounds {
+  /** Seconds of the readings, overloads included. */
+  readings: number;
+  /** Number of readings. */
+  count: number;
+  /** Seconds of walking beyond `nearest` when nothing is open. */
   far: number;
 }
 
-/** Facts about sets of cells, each worked out once. */
+/** Facts about sets of cells, each worked out once. O(cells log cells) for a set. */
 export class SetBook {
   private readonly facts = new Map<number, SetFacts>();
+  private readonly bounds = new Map<number, SetBounds>();
   private readonly openings = new Map<number, number>();
+  /** Room for `farWalks`. */
+  private readonly farthest: Float64Array;
+
   constructor(
     readonly masks: Masks,
     private readonly steps: Steps,
-  ) {}
+  ) {
+    this.farthest = new Float64Array(masks.cells.size);
+  }
 
   of(set: number): SetFacts {
     const known = this.facts.get(set);
@@ -33,6 +42,19 @@ export class SetBook {
     const facts = this.workOut(set);
     this.facts.set(set, facts);
     return facts;
+  }
+
+  boundsOf(set: number): SetBounds {
+    const known = this.bounds.get(set);
+    if (known) return known;
+    const { weight, useful, nearest } = this.of(set);
+    const { cells } = this.masks;
+    const shares = bitsOf(set).map((v) => cells.weight[v] ?? 0);
+    const count = huffmanLength(shares);
+    const readings = this.readingSeconds(shares, weight, count);
+    const bounds = { readings, count, far: this.farWalks(set, useful, nearest) };
+    this.bounds.set(set, bounds);
+    return bounds;
   }
 
   /**
@@ -77,29 +99,19 @@ export class SetBook {
 
   private workOut(set: number): SetFacts {
     const { cells, beyond } = this.masks;
-    const shares = bitsOf(set).map((v) => cells.weight[v] ?? 0);
-    const weight = shares.reduce((sum, share) => sum + share, 0);
+    let weight = 0;
+    for (let rest = set; rest !== 0; rest &= rest - 1) {
+      weight += cells.weight[31 - Math.clz32(rest & -rest)] ?? 0;
+    }
     const useful: number[] = [];
-    let usefulMask = 0;
     let nearest = Infinity;
     for (let v = 1; v < cells.size; v += 1) {
       const within = set & (beyond[v] ?? 0);
       if (within === 0 || within === set) continue;
       useful.push(v);
-      usefulMask |= 1 << v;
       nearest = Math.min(nearest, cells.walk[v] ?? 0);
     }
-    if (useful.length === 0) nearest = 0;
-    const count = huffmanLength(shares);
-    return {
-      weight,
-      readings: this.readingSeconds(shares, weight, count),
-      count,
-      useful,
-      usefulMask,
-      nearest,
-      far: this.farWalks(set, useful, nearest),
-    };
+    return { weight, useful, nearest: useful.length === 0 ? 0 : nearest };
   }
 
   /** See `lowerBoundSeconds`: Huffman's number of readings, or the capacity of letters of unequal length. */
@@ -113,15 +125,17 @@ export class SetBook {
   /** Points between neighbours are walked to twice, once to open and once to close. */
   private farWalks(set: number, useful: readonly number[], nearest: number): number {
     const { cells } = this.masks;
-    const farthest = new Map<number, number>();
+    const { farthest } = this;
+    farthest.fill(nearest);
     for (const v of useful) {
       const up = cells.parent[v] ?? 0;
       if ((set & (1 << v)) === 0 || (set & (1 << up)) === 0) continue;
       const walk = cells.walk[v] ?? 0;
-      for (const end of [v, up]) farthest.set(end, Math.max(farthest.get(end) ?? 0, walk));
+      farthest[v] = Math.max(farthest[v] ?? 0, walk);
+      farthest[up] = Math.max(farthest[up] ?? 0, walk);
     }
     let seconds = 0;
-    for (const [v, walk] of farthest) seconds += 2 * (cells.weight[v] ?? 0) * (walk - nearest);
+    farthest.forEach((walk, v) => (seconds += 2 * (cells.weight[v] ?? 0) * (walk - nearest)));
     return seconds;
   }
 }

@@ -10,6 +10,21 @@ export interface State {
   spent: number;
 }
 
+/** The state with all cells in question, these points open, and walks owed. */
+export function openingState(
+  masks: Masks,
+  open: readonly number[],
+  forcedWalk: number,
+  spentWalk: number,
+): State {
+  return {
+    set: masks.everything,
+    open: open.reduce((mask, v) => mask | (1 << v), 0),
+    forced: masks.walkSeconds.indexOf(forcedWalk),
+    spent: masks.walkSeconds.indexOf(spentWalk),
+  };
+}
+
 /** One number for a state, exact below 2^53. */
 export function keyOf({ cells, walkSeconds }: Masks, { set, open, forced, spent }: State): number {
   const span = 2 ** cells.size;
