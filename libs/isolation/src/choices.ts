@@ -112,19 +112,20 @@ function visitExtensions(
   }
   let seconds = powerSeconds;
   let farthest = situation.forced;
+  const wasOpen = new Set(situation.open);
+  const kept = new Set(base);
   for (const v of base) {
-    if (situation.open.includes(v)) continue;
+    if (wasOpen.has(v)) continue;
     seconds += hands[v] ?? 0;
     farthest = Math.max(farthest, walk[v] ?? 0);
   }
   for (const v of situation.open) {
-    if (!base.includes(v)) farthest = Math.max(farthest, walk[v] ?? 0);
+    if (!kept.has(v)) farthest = Math.max(farthest, walk[v] ?? 0);
   }
-  const noneOpen = situation.open.length === 0;
   for (const v of energised) {
     const beyond = bench.countBeyond[v] ?? 0;
     if (v === 0 || beyond === 0 || beyond === count) continue;
-    if (!noneOpen && situation.open.includes(v)) continue;
+    if (wasOpen.size > 0 && wasOpen.has(v)) continue;
     const share = (lit - (bench.beyond[v] ?? 0)) / situation.weight;
     const effort = seconds + (hands[v] ?? 0) + Math.max(farthest, walk[v] ?? 0);
     visit(v, share, effort + share * overloadSeconds);

@@ -51,12 +51,17 @@ export class Workbench {
   readonly beyond: Float64Array;
   readonly countBeyond: Int32Array;
   private readonly mark: Int32Array;
+  /** By cell: the stamp of the last step that its point was open before, and after. */
+  private readonly before: Int32Array;
+  private readonly after: Int32Array;
   private stamp = 0;
 
   constructor(readonly cells: Cells) {
     this.beyond = new Float64Array(cells.size);
     this.countBeyond = new Int32Array(cells.size);
     this.mark = new Int32Array(cells.size);
+    this.before = new Int32Array(cells.size);
+    this.after = new Int32Array(cells.size);
   }
 
   /** Fills `beyond` and `countBeyond` for the cells of a situation. O(its cells). */
@@ -87,14 +92,17 @@ export class Workbench {
     let seconds = powerSeconds;
     let farthest = situation.forced;
     let farthestOpen = 0;
+    const moved = ++this.stamp;
+    for (const v of situation.open) this.before[v] = moved;
     for (const v of open) {
       farthestOpen = Math.max(farthestOpen, walk[v] ?? 0);
-      if (situation.open.includes(v)) continue;
+      this.after[v] = moved;
+      if (this.before[v] === moved) continue;
       seconds += hands[v] ?? 0;
       farthest = Math.max(farthest, walk[v] ?? 0);
     }
     for (const v of situation.open) {
-      if (!open.includes(v)) farthest = Math.max(farthest, walk[v] ?? 0);
+      if (this.after[v] !== moved) farthest = Math.max(farthest, walk[v] ?? 0);
     }
     if (tidies) farthest = Math.max(farthest, situation.spent);
     const closesSpent = situation.spent > 0 && farthest >= situation.spent;
